@@ -46,16 +46,16 @@ public:
     explicit operator bool() const { return ok(); }
 
     /// Precondition: ok().
-    [[nodiscard]] const T &value() const & { assert(ok()); return *std::get_if<0>(&m_content); }
-    [[nodiscard]] T &value() & { assert(ok()); return *std::get_if<0>(&m_content); }
-    [[nodiscard]] T &&value() && { assert(ok()); return std::move(*std::get_if<0>(&m_content)); }
+    [[nodiscard]] const T &value() const & { assert(ok()); return std::get<0>(m_content); }
+    [[nodiscard]] T &value() & { assert(ok()); return std::get<0>(m_content); }
+    [[nodiscard]] T &&value() && { assert(ok()); return std::get<0>(std::move(m_content)); }
     const T &operator*() const & { return value(); }
     T &operator*() & { return value(); }
     const T *operator->() const { return &value(); }
     T *operator->() { return &value(); }
 
     /// Precondition: !ok().
-    [[nodiscard]] const Failure &failure() const { assert(!ok()); return *std::get_if<1>(&m_content); }
+    [[nodiscard]] const Failure &failure() const { assert(!ok()); return std::get<1>(m_content); }
 
 private:
     std::variant<T, Failure> m_content;
