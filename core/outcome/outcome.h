@@ -51,17 +51,17 @@ public:
     [[nodiscard]] const T &value() const &
     {
         assert(ok());
-        return *std::get_if<0>(&m_content);
+        return std::get<0>(m_content);
     }
     [[nodiscard]] T &value() &
     {
         assert(ok());
-        return *std::get_if<0>(&m_content);
+        return std::get<0>(m_content);
     }
     [[nodiscard]] T &&value() &&
     {
         assert(ok());
-        return std::move(*std::get_if<0>(&m_content));
+        return std::get<0>(std::move(m_content));
     }
     const T &operator*() const & { return value(); }
     T &operator*() & { return value(); }
@@ -72,7 +72,7 @@ public:
     [[nodiscard]] const Failure &failure() const
     {
         assert(!ok());
-        return *std::get_if<1>(&m_content);
+        return std::get<1>(m_content);
     }
 
 private:
