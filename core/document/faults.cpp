@@ -4,9 +4,11 @@
 #include <numeric>
 #include <vector>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
-namespace {
+namespace
+{
 
 Message message(std::string_view sentence, std::initializer_list<Argument> arguments)
 {
@@ -16,18 +18,17 @@ Message message(std::string_view sentence, std::initializer_list<Argument> argum
 /// Levenshtein distance: insertions, deletions and exchanges that turn one name into the other.
 std::size_t editDistance(std::string_view left, std::string_view right)
 {
-    std::vector<std::size_t> row(right.size() + 1);
-    std::iota(row.begin(), row.end(), std::size_t{0});
+    std::vector<std::size_t> above(right.size() + 1);
+    std::iota(above.begin(), above.end(), std::size_t{0});
     for (std::size_t i = 0; i < left.size(); ++i) {
-        std::size_t diagonal = row[0];
-        row[0] = i + 1;
+        std::vector<std::size_t> row{i + 1};
         for (std::size_t j = 0; j < right.size(); ++j) {
-            const std::size_t exchanged = diagonal + (left[i] == right[j] ? 0 : 1);
-            diagonal = row[j + 1];
-            row[j + 1] = std::min({exchanged, row[j] + 1, row[j + 1] + 1});
+            const std::size_t exchanged = above[j] + (left[i] == right[j] ? 0 : 1);
+            row.push_back(std::min({exchanged, row[j] + 1, above[j + 1] + 1}));
         }
+        above = std::move(row);
     }
-    return row.back();
+    return above.empty() ? 0 : above.back();
 }
 
 } // namespace
@@ -55,12 +56,15 @@ Failure unknownName(std::string pointer, std::string_view what, std::string_view
     const std::size_t tolerated = std::max<std::size_t>(2, std::min(name.size(), longestShown) / 3);
     if (name.size() <= longestShown)
         std::ranges::copy_if(names, std::back_inserter(near), [&](std::string_view known) {
-            return editDistance(name, known) <= tolerated || (name.size() > 2 && known.find(name) != std::string_view::npos);
+            return editDistance(name, known) <= tolerated ||
+                   (name.size() > 2 && known.find(name) != std::string_view::npos);
         });
-    const std::string_view sentence = near.empty() ? "“{0}” is no {1}; known here: {2}" : "“{0}” is no {1}; did you mean {2}?";
+    const std::string_view sentence =
+        near.empty() ? "“{0}” is no {1}; known here: {2}" : "“{0}” is no {1}; did you mean {2}?";
     std::string shortened(name.substr(0, longestShown));
     // Not in the middle of a character of UTF-8.
-    while (name.size() > longestShown && !shortened.empty() && (static_cast<unsigned char>(shortened.back()) & 0x80) != 0)
+    while (name.size() > longestShown && !shortened.empty() &&
+           (static_cast<unsigned char>(shortened.back()) & 0x80) != 0)
         shortened.pop_back();
     return fault(Reason::unknownName, std::move(pointer), sentence,
                  {shortened, std::string(what), near.empty() ? listed(names) : listed(near, "or")});
@@ -70,7 +74,9 @@ std::string listed(std::span<const std::string_view> names, std::string_view con
 {
     std::string text;
     for (std::size_t i = 0; i < names.size(); ++i) {
-        if (i > 0) text += i + 1 == names.size() ? " " + std::string(conjunction) + " " : ", ";
+        const bool isLast = i + 1 == names.size();
+        if (i > 0 && !isLast) text += ", ";
+        if (i > 0 && isLast) text.append(" ").append(conjunction).append(" ");
         text += names[i];
     }
     return text;

@@ -9,15 +9,18 @@
 #include <string_view>
 #include <variant>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
 using Argument = std::variant<Figure, std::string>;
 
 [[nodiscard]] Failure fault(Reason reason, std::string pointer, std::string_view sentence,
                             std::initializer_list<Argument> arguments = {});
-[[nodiscard]] Warning remark(std::string pointer, std::string_view sentence, std::initializer_list<Argument> arguments = {});
+[[nodiscard]] Warning remark(std::string pointer, std::string_view sentence,
+                             std::initializer_list<Argument> arguments = {});
 
-/// Reason::notComputed for a part of the format that this version leaves out. `words` says what: "the gas model “gerg-2008”".
+/// Reason::notComputed for a part of the format that this version leaves out. `words` says what: "the gas model
+/// “gerg-2008”".
 [[nodiscard]] Failure notComputed(std::string pointer, std::string_view words);
 
 /// Reason::unknownName: “name” is no `what`, then the nearest of `names`, or all of them where none is near.

@@ -2,6 +2,8 @@
 
 #include "core/document/faults.h"
 
+#include <fmt/format.h>
+
 #include <fcntl.h>
 #include <sys/stat.h>
 #include <unistd.h>
@@ -12,12 +14,17 @@
 #include <cstring>
 #include <optional>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
-namespace {
+namespace
+{
+
+constexpr std::size_t mostBytes = std::size_t{256} << 20; // an endless device would fill the memory
 
 /// An open file descriptor that is closed once.
-class Descriptor {
+class Descriptor
+{
 public:
     explicit Descriptor(int number) : m_number(number) {}
     ~Descriptor()
@@ -39,7 +46,10 @@ private:
     int m_number;
 };
 
-std::string systemWords(int error) { return std::strerror(error); }
+std::string systemWords(int error)
+{
+    return std::strerror(error);
+}
 
 Failure unreadable(const std::string &path, const std::string &why)
 {
@@ -86,8 +96,8 @@ Neighbour neighbourOf(const std::filesystem::path &target)
 {
     for (int attempt = 0; attempt < 100; ++attempt) {
         Neighbour neighbour;
-        neighbour.path = target.parent_path()
-                         / ("." + target.filename().string() + "." + std::to_string(::getpid()) + "-" + std::to_string(attempt));
+        neighbour.path =
+            target.parent_path() / fmt::format(".{}.{}-{}", target.filename().string(), ::getpid(), attempt);
         neighbour.descriptor = ::open(neighbour.path.c_str(), O_WRONLY | O_CREAT | O_EXCL | O_CLOEXEC, 0666);
         if (neighbour.descriptor >= 0 || errno != EEXIST) return neighbour;
     }
@@ -96,7 +106,8 @@ Neighbour neighbourOf(const std::filesystem::path &target)
 
 void keepOwnerAndMode(int descriptor, const struct stat &existing)
 {
-    // The owner can be kept only by root and matters only to root; the mode is set after it, as chown clears bits of it.
+    // The owner can be kept only by root and matters only to root; the mode is set after it, as chown clears bits of
+    // it.
     if (::fchown(descriptor, existing.st_uid, existing.st_gid) != 0) errno = 0;
     if (::fchmod(descriptor, existing.st_mode & 07777) != 0) errno = 0;
 }
@@ -148,6 +159,7 @@ Outcome<std::string> fileText(const std::string &path)
         if (count < 0 && errno == EINTR) continue;
         if (count < 0) return unreadable(path, systemWords(errno));
         if (count == 0) return text;
+        if (text.size() > mostBytes) return unreadable(path, "it is larger than any design");
         text.append(buffer.data(), static_cast<std::size_t>(count));
     }
 }
@@ -156,7 +168,8 @@ Outcome<Written> writeWhole(const std::string &path, std::string_view bytes)
 {
     if (path.empty()) return unwritable(path, ENOENT);
     const std::filesystem::path target = linkTarget(path);
-    struct stat status {};
+    struct stat status {
+    };
     if (::stat(target.c_str(), &status) != 0) {
         if (errno != ENOENT) return unwritable(path, errno);
         return replaced(path, target, bytes, std::nullopt);

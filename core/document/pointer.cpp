@@ -2,9 +2,11 @@
 
 #include <charconv>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
-namespace {
+namespace
+{
 
 /// One token with "~1" and "~0" resolved; none where another "~" stands in it.
 std::optional<std::string> unescaped(std::string_view token)

@@ -8,7 +8,8 @@
 #include <string_view>
 #include <vector>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
 /// "/a~1b/0" → {"a/b", "0"}; "" → {}. None where the text is no pointer ("a", "/~2").
 [[nodiscard]] std::optional<std::vector<std::string>> pointerTokens(std::string_view pointer);

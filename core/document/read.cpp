@@ -4,9 +4,11 @@
 
 #include <algorithm>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
-namespace {
+namespace
+{
 
 // More than any document has; keeps walks that call themselves off the end of the stack.
 constexpr int deepestNesting = 100;
@@ -55,8 +57,7 @@ std::optional<Failure> repeatedKey(std::string_view text, Position &position)
 
 Outcome<Design> read(std::string_view text, Position &position)
 {
-    if (nestingDepth(text) > deepestNesting)
-        return notJson(text, "brackets nest more than 100 deep", 0, position);
+    if (nestingDepth(text) > deepestNesting) return notJson(text, "brackets nest more than 100 deep", 0, position);
     Outcome<Json> json = parsed(text, position);
     if (!json) return json.failure();
     if (const std::optional<Failure> repeated = repeatedKey(text, position)) return *repeated;
@@ -71,9 +72,8 @@ Position positionOf(std::string_view text, std::string_view pointer)
 {
     std::size_t nearest = 0;
     walkPlaces(text, [&](const Place &place) {
-        const bool encloses
-            = pointer.starts_with(place.pointer)
-              && (pointer.size() == place.pointer.size() || pointer[place.pointer.size()] == '/');
+        const bool encloses = pointer.starts_with(place.pointer) &&
+                              (pointer.size() == place.pointer.size() || pointer[place.pointer.size()] == '/');
         if (encloses) nearest = place.byte;
         return !(encloses && pointer.size() == place.pointer.size());
     });

@@ -4,7 +4,8 @@
 #include <string>
 #include <string_view>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
 /// Digest of `bytes` as 64 lower-case hexadecimal digits. Source: FIPS 180-4 (2015), 5.1.1, 5.3.3, 6.2.
 [[nodiscard]] std::string sha256(std::string_view bytes);

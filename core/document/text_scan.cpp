@@ -5,11 +5,16 @@
 #include <algorithm>
 #include <set>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
-namespace {
+namespace
+{
 
-bool isBlank(char c) { return c == ' ' || c == '\t' || c == '\n' || c == '\r'; }
+bool isBlank(char c)
+{
+    return c == ' ' || c == '\t' || c == '\n' || c == '\r';
+}
 
 /// The byte after the string that begins at `byte` with a quotation mark.
 std::size_t afterString(std::string_view text, std::size_t byte)
@@ -31,7 +36,8 @@ std::string keyText(std::string_view quoted)
     return key.is_string() ? key.get<std::string>() : std::string(quoted);
 }
 
-class Walk {
+class Walk
+{
 public:
     Walk(std::string_view text, const std::function<bool(const Place &)> &visit) : m_text(text), m_visit(visit) {}
 
@@ -46,8 +52,7 @@ private:
     [[nodiscard]] char here() const { return m_byte < m_text.size() ? m_text[m_byte] : '\0'; }
     void skipBlanks()
     {
-        while (m_byte < m_text.size() && isBlank(m_text[m_byte]))
-            ++m_byte;
+        while (m_byte < m_text.size() && isBlank(m_text[m_byte])) ++m_byte;
     }
 
     bool value(const std::string &pointer, std::size_t keyByte, bool repeated)
@@ -59,8 +64,7 @@ private:
             m_byte = afterString(m_text, m_byte);
             return true;
         }
-        while (m_byte < m_text.size() && !isBlank(here()) && here() != ',' && here() != ']' && here() != '}')
-            ++m_byte;
+        while (m_byte < m_text.size() && !isBlank(here()) && here() != ',' && here() != ']' && here() != '}') ++m_byte;
         return true;
     }
 
@@ -114,8 +118,8 @@ Position positionAt(std::string_view text, std::size_t byte)
     const std::string_view before = text.substr(0, std::min(byte, text.size()));
     const std::size_t lineStart = before.rfind('\n') == std::string_view::npos ? 0 : before.rfind('\n') + 1;
     // Bytes 10xxxxxx continue a character of UTF-8.
-    const auto characters = std::ranges::count_if(before.substr(lineStart),
-                                                  [](char c) { return (static_cast<unsigned char>(c) & 0xC0) != 0x80; });
+    const auto characters = std::ranges::count_if(
+        before.substr(lineStart), [](char c) { return (static_cast<unsigned char>(c) & 0xC0) != 0x80; });
     return {.line = static_cast<int>(std::ranges::count(before, '\n')) + 1, .column = static_cast<int>(characters) + 1};
 }
 
@@ -135,6 +139,9 @@ int nestingDepth(std::string_view text)
     return deepest;
 }
 
-void walkPlaces(std::string_view text, const std::function<bool(const Place &)> &visit) { Walk(text, visit).run(); }
+void walkPlaces(std::string_view text, const std::function<bool(const Place &)> &visit)
+{
+    Walk(text, visit).run();
+}
 
 } // namespace quasistat::document

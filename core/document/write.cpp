@@ -2,15 +2,23 @@
 
 #include "core/document/sha256.h"
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
-namespace {
+namespace
+{
 
 constexpr std::size_t widest = 110;
 
-bool isContainer(const Json &value) { return value.is_object() || value.is_array(); }
+bool isContainer(const Json &value)
+{
+    return value.is_object() || value.is_array();
+}
 
-std::string quoted(const std::string &text) { return Json(text).dump(-1, ' ', false, Json::error_handler_t::replace); }
+std::string quoted(const std::string &text)
+{
+    return Json(text).dump(-1, ' ', false, Json::error_handler_t::replace);
+}
 
 void appendOnOneLine(const Json &value, std::string &text)
 {
@@ -30,7 +38,10 @@ void appendOnOneLine(const Json &value, std::string &text)
 }
 
 /// A list of objects is read line by line: a segment or a limit each.
-bool isListOfObjects(const Json &value) { return value.is_array() && !value.empty() && value.front().is_object(); }
+bool isListOfObjects(const Json &value)
+{
+    return value.is_array() && !value.empty() && value.front().is_object();
+}
 
 void append(const Json &value, std::size_t indent, std::size_t column, bool mayFold, std::string &text)
 {
