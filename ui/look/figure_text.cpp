@@ -1,0 +1,139 @@
+#include "ui/look/figure_text.h"
+
+#include <QFontMetricsF>
+
+#include <algorithm>
+
+namespace quasistat::ui
+{
+namespace
+{
+
+bool isDigit(QChar c)
+{
+    return c >= QLatin1Char('0') && c <= QLatin1Char('9');
+}
+
+// The widest digit of a face, or 0 where all are equal and a line may be drawn in one piece.
+double cellWidth(const QFontMetricsF &metrics)
+{
+    double widest = 0.0;
+    double narrowest = 1e9;
+    for (char digit = '0'; digit <= '9'; ++digit) {
+        const double width = metrics.horizontalAdvance(QLatin1Char(digit));
+        widest = std::max(widest, width);
+        narrowest = std::min(narrowest, width);
+    }
+    return widest - narrowest < 0.01 ? 0.0 : widest;
+}
+
+QFont runFont(const QFont &font, const Run &run)
+{
+    QFont result = font;
+    if (run.italic) result.setItalic(true);
+    if (run.bold) result.setWeight(QFont::DemiBold);
+    if (run.subscript) result.setPixelSize(std::max(1, font.pixelSize() * 3 / 4));
+    return result;
+}
+
+double baselineShift(const QFont &font, const Run &run)
+{
+    return run.subscript ? 0.2 * font.pixelSize() : 0.0;
+}
+
+// A run in pieces: each digit by itself, everything between as a whole.
+template <class Visit>
+double eachPiece(const QString &text, const QFont &font, Visit visit)
+{
+    const QFontMetricsF metrics(font);
+    const double cell = cellWidth(metrics);
+    if (cell == 0.0 || std::none_of(text.begin(), text.end(), isDigit)) {
+        visit(0.0, text);
+        return metrics.horizontalAdvance(text);
+    }
+    double x = 0.0;
+    for (qsizetype i = 0; i < text.size();) {
+        if (isDigit(text.at(i))) {
+            visit(x + (cell - metrics.horizontalAdvance(text.at(i))) / 2.0, QString(text.at(i)));
+            x += cell;
+            ++i;
+            continue;
+        }
+        const qsizetype from = i;
+        while (i < text.size() && !isDigit(text.at(i))) ++i;
+        const QString between = text.mid(from, i - from);
+        visit(x, between);
+        x += metrics.horizontalAdvance(between);
+    }
+    return x;
+}
+
+qsizetype decimalPlace(const QString &figure)
+{
+    const qsizetype place = figure.indexOf(QLatin1Char('.'));
+    return place < 0 ? figure.size() : place;
+}
+
+} // namespace
+
+double textWidth(const RichText &text, const QFont &font)
+{
+    double width = 0.0;
+    for (const auto &run : text.runs())
+        width += eachPiece(run.text, runFont(font, run), [](double, const QString &) {});
+    return width;
+}
+
+double textWidth(const QString &text, const QFont &font)
+{
+    return textWidth(RichText::plain(text), font);
+}
+
+void drawText(QPainter &painter, QPointF anchor, const RichText &text, const QFont &font, Align align)
+{
+    if (align != Align::left) anchor.rx() -= textWidth(text, font) * (align == Align::centre ? 0.5 : 1.0);
+    for (const auto &run : text.runs()) {
+        const QFont used = runFont(font, run);
+        const QPointF at = anchor + QPointF(0.0, baselineShift(font, run));
+        painter.setFont(used);
+        anchor.rx() += eachPiece(
+            run.text, used, [&](double x, const QString &piece) { painter.drawText(at + QPointF(x, 0.0), piece); });
+    }
+}
+
+void drawText(QPainter &painter, QPointF anchor, const QString &text, const QFont &font, Align align)
+{
+    drawText(painter, anchor, RichText::plain(text), font, align);
+}
+
+QString elided(const QString &text, const QFont &font, double width)
+{
+    if (textWidth(text, font) <= width) return text;
+    QString shorter = text;
+    while (!shorter.isEmpty()) {
+        shorter.chop(1);
+        const QString candidate = shorter.trimmed() + QChar(0x2026);
+        if (textWidth(candidate, font) <= width) return candidate;
+    }
+    return QString(QChar(0x2026));
+}
+
+DecimalColumn decimalColumn(const QStringList &figures, const QFont &font)
+{
+    DecimalColumn column;
+    for (const auto &figure : figures) {
+        const qsizetype place = decimalPlace(figure);
+        column.whole = std::max(column.whole, textWidth(figure.left(place), font));
+        column.fraction = std::max(column.fraction, textWidth(figure.mid(place), font));
+    }
+    return column;
+}
+
+void drawDecimal(QPainter &painter, QPointF anchor, const QString &figure, const QFont &font)
+{
+    const qsizetype place = decimalPlace(figure);
+    drawText(painter, anchor, figure.left(place), font, Align::right);
+    drawText(painter, anchor, figure.mid(place), font);
+}
+
+} // namespace quasistat::ui

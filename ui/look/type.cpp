@@ -1,0 +1,64 @@
+#include "ui/look/type.h"
+
+#include <QFontDatabase>
+
+#include <cmath>
+
+namespace quasistat::ui
+{
+namespace
+{
+
+// What platforms answer when they have no interface face of their own.
+bool isGeneric(const QString &family)
+{
+    static constexpr const char *generic[] = {"",          "Sans",  "Sans Serif",    "sans-serif",
+                                              "Helvetica", "Arial", "MS Sans Serif", "DejaVu Sans"};
+    for (const char *name : generic)
+        if (family.compare(QLatin1String(name), Qt::CaseInsensitive) == 0) return true;
+    return false;
+}
+
+} // namespace
+
+QString interfaceFamily()
+{
+    const QString system = QFontDatabase::systemFont(QFontDatabase::GeneralFont).family();
+    if (!isGeneric(system)) return system;
+    for (const auto &preferred : {QStringLiteral("Inter"), QStringLiteral("DejaVu Sans")})
+        if (QFontDatabase::hasFamily(preferred)) return preferred;
+    return system;
+}
+
+QFont face(double pixels, QFont::Weight weight)
+{
+    QFont result(interfaceFamily());
+    result.setPixelSize(static_cast<int>(std::lround(pixels)));
+    result.setWeight(weight);
+    // Fractional advances: a label keeps its width on screen, in print and at any zoom.
+    result.setHintingPreference(QFont::PreferNoHinting);
+    return result;
+}
+
+QFont headingFace()
+{
+    return face(16, QFont::DemiBold);
+}
+QFont titleFace()
+{
+    return face(14, QFont::DemiBold);
+}
+QFont bodyFace()
+{
+    return face(13);
+}
+QFont labelFace()
+{
+    return face(12);
+}
+QFont captionFace()
+{
+    return face(11);
+}
+
+} // namespace quasistat::ui

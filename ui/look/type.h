@@ -1,0 +1,23 @@
+#pragma once
+// The faces and sizes of type: few, and the same everywhere.
+
+#include <QFont>
+#include <QString>
+
+namespace quasistat::ui
+{
+
+/// The platform's interface face; where the platform names only a generic one: Inter if installed, then DejaVu Sans.
+/// Needs a QGuiApplication.
+[[nodiscard]] QString interfaceFamily();
+
+/// The interface face at `pixels`, a device-independent size.
+[[nodiscard]] QFont face(double pixels, QFont::Weight weight = QFont::Normal);
+
+[[nodiscard]] QFont headingFace(); ///< 16/600, the ledger's heading
+[[nodiscard]] QFont titleFace();   ///< 14/600, sections and header values
+[[nodiscard]] QFont bodyFace();    ///< 13, body and figures
+[[nodiscard]] QFont labelFace();   ///< 12, labels, ticks, second lines
+[[nodiscard]] QFont captionFace(); ///< 11, header captions
+
+} // namespace quasistat::ui
