@@ -6,6 +6,7 @@
 #include "ui/look/type.h"
 
 #include <QAbstractItemView>
+#include <QApplication>
 #include <QGridLayout>
 #include <QSignalBlocker>
 
@@ -46,11 +47,9 @@ void FormView::setForm(const std::vector<FormField> &fields, int columns)
 
 void FormView::build(const std::vector<FormField> &fields, int columns)
 {
-    for (Line &line : m_lines) // a field that goes away must not enter its text as its focus leaves
-        if (line.value) line.value->setModified(false);
-    qDeleteAll(findChildren<QWidget *>(QString(), Qt::FindDirectChildrenOnly));
-    delete layout();
-    m_lines.clear();
+    const QWidget *focus = isAncestorOf(QApplication::focusWidget()) ? QApplication::focusWidget() : nullptr;
+    const QString focused = focus ? focus->objectName() : QString();
+    clear();
     m_columns = columns;
 
     auto *grid = new QGridLayout(this);
@@ -70,6 +69,36 @@ void FormView::build(const std::vector<FormField> &fields, int columns)
         grid->setColumnStretch(4 * column + 2, 9);
         if (column + 1 < columns) grid->setColumnMinimumWidth(4 * column + 3, 8);
     }
+    for (const Line &line : m_lines) {
+        line.caption->show();
+        if (line.choice) line.choice->show();
+        if (line.value) line.value->QWidget::show();
+    }
+    if (focused.isEmpty()) return;
+    if (auto *again = findChild<QWidget *>(focused)) again->setFocus(Qt::OtherFocusReason);
+}
+
+void FormView::clear()
+{
+    for (Line &line : m_lines) // a field that goes away must not enter its text as its focus leaves
+        if (line.value) line.value->setModified(false);
+    m_lines.clear();
+    // Later: the form may be built anew by a signal of one of these.
+    for (auto *child : findChildren<QWidget *>(QString(), Qt::FindDirectChildrenOnly)) {
+        child->hide();
+        child->setParent(nullptr);
+        child->deleteLater();
+    }
+    delete layout();
+}
+
+void FormView::finishTyping()
+{
+    for (const Line &line : m_lines)
+        if (line.value && line.value->isBeingTyped()) {
+            line.value->enter();
+            return;
+        }
 }
 
 void FormView::buildLine(Line &line, QGridLayout &grid, int row, int column)

@@ -29,6 +29,9 @@ public:
     /// Sentences under their fields, by id; others are cleared. A text being typed that cannot stand keeps its own.
     void setSentences(const QMap<QString, QString> &byId);
     void focusFirst();
+    /// Enters the text that is being typed, as if its field were left.
+    void finishTyping();
+    [[nodiscard]] int columns() const { return m_columns; }
 
     [[nodiscard]] TextField *valueOf(const QString &id) const;
     [[nodiscard]] QComboBox *choiceOf(const QString &id) const;
@@ -50,6 +53,7 @@ private:
         TextField *value = nullptr;
         QLabel *sentence = nullptr;
     };
+    void clear();
     void build(const std::vector<FormField> &fields, int columns);
     void buildLine(Line &line, QGridLayout &grid, int row, int column);
     void buildChoice(Line &line);

@@ -14,6 +14,7 @@ public:
     /// Shows what the document holds; a text somebody is typing stays.
     void show(const QString &text);
     using QLineEdit::show;
+    void enter(); ///< as Enter: announces a changed text
     [[nodiscard]] bool isBeingTyped() const { return hasFocus() && isModified(); }
 
 signals:
@@ -26,7 +27,6 @@ protected:
     void focusOutEvent(QFocusEvent *event) override;
 
 private:
-    void enter();
     QString m_shown;
 };
 
