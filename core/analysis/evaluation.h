@@ -4,7 +4,8 @@
 #include "core/analysis/envelope.h"
 #include "core/path/input.h"
 
-namespace quasistat::analysis {
+namespace quasistat::analysis
+{
 
 struct Evaluation {
     path::PathInput input;

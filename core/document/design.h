@@ -8,7 +8,8 @@
 #include <string>
 #include <string_view>
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
 /// Order of keys is kept, so that a file comes back as it was written.
 using Json = nlohmann::ordered_json;
@@ -25,8 +26,8 @@ struct Design {
     bool operator==(const Design &other) const { return json == other.json; }
 };
 
-/// Reads a document's text. Fails with Reason::syntax (not JSON, duplicate key) or wrongType (not an object); `position` is
-/// set to the place of the error.
+/// Reads a document's text. Fails with Reason::syntax (not JSON, duplicate key) or wrongType (not an object);
+/// `position` is set to the place of the error.
 [[nodiscard]] Outcome<Design> read(std::string_view text, Position &position);
 
 /// The place of `pointer` in `text` (which `read` accepted); of the nearest enclosing value where it does not exist.

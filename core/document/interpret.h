@@ -6,7 +6,8 @@
 #include "core/gas/library.h"
 #include "core/units/display.h"
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
 /// What a design says, as far as it can be computed.
 struct Interpretation {
@@ -15,9 +16,9 @@ struct Interpretation {
     std::vector<Warning> warnings; ///< unknown keys, normalised fractions, …
 };
 
-/// Fails where nothing can be computed (version, gas, start, surroundings, limits, a key that affects all results and is not
-/// computed by this version). A fault in a segment fails that segment alone: it stays in its place in `input.segments`.
-/// Every pointer is into the document.
+/// Fails where nothing can be computed (version, gas, start, surroundings, limits, a key that affects all results and
+/// is not computed by this version). A fault in a segment fails that segment alone: it stays in its place in
+/// `input.segments`. Every pointer is into the document.
 [[nodiscard]] Outcome<Interpretation> interpret(const Design &design, const gas::Library &library);
 
 /// interpret, then evaluate; the interpretation's warnings come first in the path's.

@@ -4,9 +4,11 @@
 #include "core/analysis/evaluation.h"
 #include "core/document/design.h"
 
-namespace quasistat::document {
+namespace quasistat::document
+{
 
-/// `curvePoints` > 1 adds to each quasi-static segment `curve` with that many points, even in ln V (on an isochore in p).
+/// `curvePoints` > 1 adds to each quasi-static segment `curve` with that many points, even in ln V (on an isochore in
+/// p).
 [[nodiscard]] Json resultJson(const Design &design, const analysis::Evaluation &evaluation, int curvePoints,
                               std::string_view programVersion);
 

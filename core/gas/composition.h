@@ -4,7 +4,8 @@
 #include <string>
 #include <vector>
 
-namespace quasistat::gas {
+namespace quasistat::gas
+{
 
 struct Share {
     std::string component; ///< "nitrogen", "carbon dioxide"

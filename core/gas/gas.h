@@ -12,7 +12,8 @@
 #include <string>
 #include <string_view>
 
-namespace quasistat::gas {
+namespace quasistat::gas
+{
 
 /// Molar Helmholtz energy a(T, v) [J/mol] of the homogeneous fluid and its partial derivatives.
 struct Helmholtz {
@@ -38,7 +39,8 @@ struct Validity {
 /// Two of its intensive properties fix a state.
 enum class Property { temperature, molarVolume, pressure, internalEnergy, enthalpy, entropy };
 
-class Gas {
+class Gas
+{
 public:
     virtual ~Gas() = default;
 

@@ -7,7 +7,8 @@
 #include <map>
 #include <vector>
 
-namespace quasistat::gas {
+namespace quasistat::gas
+{
 
 /// A perfect gas: p v = R T, constant c_p = γ R/(γ − 1). Exact SI gas constant.
 struct PerfectGas {
@@ -26,7 +27,8 @@ struct ComponentFacts {
 };
 
 /// The published ideal-gas polynomials, read once; then const and shared.
-class Library {
+class Library
+{
 public:
     /// Reads the data compiled into the program (resources/gases).
     Library();

@@ -3,20 +3,21 @@
 
 #include <optional>
 
-namespace quasistat::gas {
+namespace quasistat::gas
+{
 
 /// Equilibrium state at (T, v). All energies and entropies on the common reference state: each component as ideal gas
 /// at 298.15 K and 100 kPa has h = 0, s = 0; mixtures include the entropy of mixing.
 struct MolarState {
-    double temperature;         ///< [K]
-    double molarVolume;         ///< [m³/mol]
-    double pressure;            ///< [Pa]
-    double internalEnergy;      ///< [J/mol]
-    double enthalpy;            ///< [J/mol]
-    double entropy;             ///< [J/(mol K)]
-    double isochoricHeatCapacity; ///< c_v [J/(mol K)], of the equilibrium mixture under the dome
-    double dpdT;                ///< (∂p/∂T)_v [Pa/K]
-    double dpdv;                ///< (∂p/∂v)_T [Pa mol/m³]; 0 under the dome
+    double temperature;                   ///< [K]
+    double molarVolume;                   ///< [m³/mol]
+    double pressure;                      ///< [Pa]
+    double internalEnergy;                ///< [J/mol]
+    double enthalpy;                      ///< [J/mol]
+    double entropy;                       ///< [J/(mol K)]
+    double isochoricHeatCapacity;         ///< c_v [J/(mol K)], of the equilibrium mixture under the dome
+    double dpdT;                          ///< (∂p/∂T)_v [Pa/K]
+    double dpdv;                          ///< (∂p/∂v)_T [Pa mol/m³]; 0 under the dome
     std::optional<double> vapourFraction; ///< moles of vapour per mole, 0–1; none outside the dome
 };
 

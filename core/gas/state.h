@@ -3,9 +3,11 @@
 
 #include "core/gas/gas.h"
 
-namespace quasistat::gas {
+namespace quasistat::gas
+{
 
-class State {
+class State
+{
 public:
     /// `amount` [mol] > 0 of `gas` in the intensive state `molar`.
     State(GasPtr gas, double amount, const MolarState &molar);
@@ -18,15 +20,15 @@ public:
     /// Precondition: not evacuated.
     [[nodiscard]] const MolarState &molar() const { return *m_molar; }
 
-    [[nodiscard]] double amount() const { return m_amount; }                ///< [mol]
-    [[nodiscard]] double mass() const { return m_amount * m_gas->molarMass(); } ///< [kg]
-    [[nodiscard]] double volume() const { return m_volume; }                ///< [m³]
+    [[nodiscard]] double amount() const { return m_amount; }                            ///< [mol]
+    [[nodiscard]] double mass() const { return m_amount * m_gas->molarMass(); }         ///< [kg]
+    [[nodiscard]] double volume() const { return m_volume; }                            ///< [m³]
     [[nodiscard]] double pressure() const { return m_molar ? m_molar->pressure : 0.0; } ///< [Pa]
-    [[nodiscard]] double internalEnergy() const;                            ///< U [J], whole charge
-    [[nodiscard]] double enthalpy() const;                                  ///< H [J]
-    [[nodiscard]] double entropy() const;                                   ///< S [J/K]
-    [[nodiscard]] std::optional<double> temperature() const;                ///< [K]; none if evacuated
-    [[nodiscard]] std::optional<double> compressibility() const;            ///< p v/(R T); none if evacuated
+    [[nodiscard]] double internalEnergy() const;                                        ///< U [J], whole charge
+    [[nodiscard]] double enthalpy() const;                                              ///< H [J]
+    [[nodiscard]] double entropy() const;                                               ///< S [J/K]
+    [[nodiscard]] std::optional<double> temperature() const;                            ///< [K]; none if evacuated
+    [[nodiscard]] std::optional<double> compressibility() const; ///< p v/(R T); none if evacuated
 
 private:
     State() = default;

@@ -9,7 +9,8 @@
 #include <variant>
 #include <vector>
 
-namespace quasistat {
+namespace quasistat
+{
 
 /// One figure of a message: an SI value with its quantity, or words that are shown as they stand.
 struct Figure {
@@ -22,6 +23,9 @@ struct Message {
     std::string text;
     std::vector<std::variant<Figure, std::string>> arguments;
 };
+
+/// "what: why" as one message, the figures of both kept.
+[[nodiscard]] Message because(Message what, const Message &why);
 
 /// A message that belongs to a place of the document (JSON Pointer, RFC 6901; empty: the whole document).
 struct Warning {

@@ -4,7 +4,8 @@
 #include "core/gas/gas.h"
 #include "core/path/segment.h"
 
-namespace quasistat::path {
+namespace quasistat::path
+{
 
 /// Three that fix the state, or a volume that is evacuated.
 struct Start {
@@ -16,9 +17,9 @@ struct Start {
 };
 
 struct Surroundings {
-    double pressure = 101325.0;   ///< p₀ [Pa]
-    double temperature = 298.15;  ///< T₀ [K]
-    bool pressureStated = false;  ///< false: the default, warned about where it enters a result
+    double pressure = 101325.0;  ///< p₀ [Pa]
+    double temperature = 298.15; ///< T₀ [K]
+    bool pressureStated = false; ///< false: the default, warned about where it enters a result
     bool temperatureStated = false;
 };
 

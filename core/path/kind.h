@@ -7,16 +7,32 @@
 #include <optional>
 #include <span>
 
-namespace quasistat::path {
+namespace quasistat::path
+{
 
 /// In the order of path::Process.
 enum class Kind {
-    isothermal, isobaric, isochoric, polytropic, isentropic, linear, constantExternalPressure, stepped, freeExpansion
+    isothermal,
+    isobaric,
+    isochoric,
+    polytropic,
+    isentropic,
+    linear,
+    constantExternalPressure,
+    stepped,
+    freeExpansion
 };
 
 /// Colour, dash pattern and glyph go by family (resources/palette.json).
 enum class Family {
-    isothermal, isobaric, isochoric, polytropic, isentropicAdiabatic, linearTraced, irreversible, movingMatter
+    isothermal,
+    isobaric,
+    isochoric,
+    polytropic,
+    isentropicAdiabatic,
+    linearTraced,
+    irreversible,
+    movingMatter
 };
 
 struct KindFacts {
@@ -24,7 +40,7 @@ struct KindFacts {
     std::string_view key;   ///< in the document: "constant-external-pressure"
     std::string_view words; ///< as read by a person: "constant external pressure"
     Family family;
-    bool quasiStatic;       ///< the curve's area is the work
+    bool quasiStatic; ///< the curve's area is the work
 };
 
 inline constexpr std::array kindTable{
@@ -41,8 +57,14 @@ inline constexpr std::array kindTable{
 };
 static_assert(kindTable.size() == std::variant_size_v<Process>, "every kind of Process has its facts");
 
-[[nodiscard]] constexpr const KindFacts &facts(Kind kind) { return kindTable[static_cast<std::size_t>(kind)]; }
-[[nodiscard]] inline Kind kindOf(const Process &process) { return static_cast<Kind>(process.index()); }
+[[nodiscard]] constexpr const KindFacts &facts(Kind kind)
+{
+    return kindTable[static_cast<std::size_t>(kind)];
+}
+[[nodiscard]] inline Kind kindOf(const Process &process)
+{
+    return static_cast<Kind>(process.index());
+}
 /// "isothermal" → Kind::isothermal; none for a key that is not computed.
 [[nodiscard]] std::optional<Kind> kindFromKey(std::string_view key);
 /// Kinds of the format that this version does not compute: refused by name, never ignored.

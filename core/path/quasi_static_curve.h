@@ -5,33 +5,40 @@
 
 #include <variant>
 
-namespace quasistat::path {
+namespace quasistat::path
+{
 
 /// Laws, each through the start state of the curve.
-struct ConstantTemperature {};
-struct ConstantPressure {};
-struct ConstantVolume {};
-struct ConstantEntropy {};
+struct ConstantTemperature {
+};
+struct ConstantPressure {
+};
+struct ConstantVolume {
+};
+struct ConstantEntropy {
+};
 struct PowerLaw {
     double exponent; ///< p Vⁿ = constant
 };
 struct StraightLine {
     double stiffness; ///< dp/dv [Pa mol/m³], molar
 };
-using Law = std::variant<ConstantTemperature, ConstantPressure, ConstantVolume, ConstantEntropy, PowerLaw, StraightLine>;
+using Law =
+    std::variant<ConstantTemperature, ConstantPressure, ConstantVolume, ConstantEntropy, PowerLaw, StraightLine>;
 
 /// A state on a curve with the slopes there.
 struct CurveState {
     gas::MolarState state;
-    double dTdx; ///< dT/dx [K]
-    double dpdx; ///< dp/dx [Pa]
-    double dvdx; ///< dv/dx [m³/mol]
+    double dTdx;  ///< dT/dx [K]
+    double dpdx;  ///< dp/dx [Pa]
+    double dvdx;  ///< dv/dx [m³/mol]
     double Tdsdx; ///< T ds/dx [J/mol]: heat per coordinate, from c_v and (∂p/∂T)_v, not from entropy differences
 };
 
 /// The coordinate x is ln(v/v₁) on every law but ConstantVolume, where it is ln(T/T₁); x = 0 at the start.
 /// Positive x expands (or heats at constant volume). Immutable; shared between threads.
-class QuasiStaticCurve {
+class QuasiStaticCurve
+{
 public:
     QuasiStaticCurve(gas::GasPtr gas, double amount, const gas::MolarState &start, Law law, double endCoordinate);
 

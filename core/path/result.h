@@ -10,7 +10,8 @@
 #include <optional>
 #include <vector>
 
-namespace quasistat::path {
+namespace quasistat::path
+{
 
 /// A point for drawing: whole charge, SI.
 struct CurvePoint {
@@ -34,14 +35,15 @@ struct Extrema {
 
 /// The figures that two independent routes must agree on (format of results, "Audit").
 struct Audit {
-    double firstLawResidual = 0.0;         ///< ΔU − W − Q, Q by its own route [J]
-    std::optional<double> heatByEntropy;   ///< ∫T dS [J]; none for an irreversible segment
-    double scale = 0.0;                    ///< max(|W|, |Q|, |ΔU|, 1e-6 nRT) [J]
-    double lostWorkResidual = 0.0;         ///< irreversible: T₀ S_gen against the availability balance [J]
-    bool ok = false;                       ///< both residuals within 1e-9 of the scale
+    double firstLawResidual = 0.0;       ///< ΔU − W − Q, Q by its own route [J]
+    std::optional<double> heatByEntropy; ///< ∫T dS [J]; none for an irreversible segment
+    double scale = 0.0;                  ///< max(|W|, |Q|, |ΔU|, 1e-6 nRT) [J]
+    double lostWorkResidual = 0.0;       ///< irreversible: T₀ S_gen against the availability balance [J]
+    bool ok = false;                     ///< both residuals within 1e-9 of the scale
 };
 
-/// Heat that enters and leaves along a segment, each positive [J], and the gas (or bath) temperatures where it does [K].
+/// Heat that enters and leaves along a segment, each positive [J], and the gas (or bath) temperatures where it does
+/// [K].
 struct HeatExchange {
     double in = 0.0;
     double out = 0.0;
@@ -57,12 +59,12 @@ struct IdealGasFigures {
 
 /// Everything drawn for one segment on the p–V plane.
 struct Drawing {
-    Polyline curve;                   ///< the states passed through; for irreversible kinds the line that is drawn
-    Polyline reversibleLimit;         ///< ghost; empty for quasi-static kinds
-    bool hatchShortfall = false;      ///< isothermal contact: the area between work line and limit is the shortfall
-    bool areaIsWork = true;           ///< the area under `workLine` is the work
-    Polyline workLine;                ///< outline whose area is the work: the curve, staircase or level line
-    bool dashedOutline = false;       ///< the drawn curve's own area is not the work
+    Polyline curve;              ///< the states passed through; for irreversible kinds the line that is drawn
+    Polyline reversibleLimit;    ///< ghost; empty for quasi-static kinds
+    bool hatchShortfall = false; ///< isothermal contact: the area between work line and limit is the shortfall
+    bool areaIsWork = true;      ///< the area under `workLine` is the work
+    Polyline workLine;           ///< outline whose area is the work: the curve, staircase or level line
+    bool dashedOutline = false;  ///< the drawn curve's own area is not the work
 };
 
 struct SegmentResult {
@@ -72,25 +74,25 @@ struct SegmentResult {
     gas::State to;
     std::optional<double> exponent;
 
-    double work = 0.0;                           ///< boundary work on the gas [J]
-    double heat = 0.0;                           ///< into the gas [J]
-    std::optional<double> steadyFlowWork;        ///< ΔH − Q [J]
-    std::optional<double> rodWork;               ///< W + p₀ ΔV [J]
-    std::optional<double> atmosphereWork;        ///< p₀ ΔV [J], on the surroundings
-    double deltaInternalEnergy = 0.0;            ///< [J]
-    double deltaEnthalpy = 0.0;                  ///< [J]
-    double deltaEntropy = 0.0;                   ///< [J/K]
-    double entropyGenerated = 0.0;               ///< [J/K]
-    double lostWork = 0.0;                       ///< T₀ S_gen [J]
-    std::optional<double> reversibleLimitWork;   ///< [J]
+    double work = 0.0;                         ///< boundary work on the gas [J]
+    double heat = 0.0;                         ///< into the gas [J]
+    std::optional<double> steadyFlowWork;      ///< ΔH − Q [J]
+    std::optional<double> rodWork;             ///< W + p₀ ΔV [J]
+    std::optional<double> atmosphereWork;      ///< p₀ ΔV [J], on the surroundings
+    double deltaInternalEnergy = 0.0;          ///< [J]
+    double deltaEnthalpy = 0.0;                ///< [J]
+    double deltaEntropy = 0.0;                 ///< [J/K]
+    double entropyGenerated = 0.0;             ///< [J/K]
+    double lostWork = 0.0;                     ///< T₀ S_gen [J]
+    std::optional<double> reversibleLimitWork; ///< [J]
     std::optional<double> reversibleLimitSteadyFlowWork;
-    std::optional<double> shortfall;             ///< W − W_rev [J]
-    std::optional<double> recovery;              ///< W/W_rev expanding, W_rev/W compressing
-    double energyWithMatter = 0.0;               ///< [J]
-    double amountIn = 0.0;                       ///< [mol]
-    std::optional<double> availableWorkOut;      ///< [J]
+    std::optional<double> shortfall;        ///< W − W_rev [J]
+    std::optional<double> recovery;         ///< W/W_rev expanding, W_rev/W compressing
+    double energyWithMatter = 0.0;          ///< [J]
+    double amountIn = 0.0;                  ///< [mol]
+    std::optional<double> availableWorkOut; ///< [J]
     std::optional<IdealGasFigures> idealGas;
-    std::optional<double> duration;              ///< [s]
+    std::optional<double> duration; ///< [s]
 
     Extrema extrema{};
     HeatExchange exchange;
@@ -109,8 +111,8 @@ struct StoredEnergy {
 /// A state with the figures that need the surroundings.
 struct StateResult {
     gas::State state;
-    std::optional<double> availableWork;       ///< [J]
-    std::optional<StoredEnergy> storedEnergy;  ///< none below p₀ or outside the model
+    std::optional<double> availableWork;      ///< [J]
+    std::optional<StoredEnergy> storedEnergy; ///< none below p₀ or outside the model
 };
 
 struct Totals {

@@ -1,17 +1,21 @@
 #pragma once
 // What the user said of a segment, in SI, and nothing derived.
 
+#include "core/units/quantity.h"
+
 #include <optional>
 #include <string>
 #include <string_view>
 #include <variant>
 #include <vector>
 
-namespace quasistat::path {
+namespace quasistat::path
+{
 
 /// Keys of `end` in the document.
 enum class EndKey { pressure, volume, temperature, pressureRatio, volumeRatio, work, heat };
 [[nodiscard]] std::string_view keyOf(EndKey key); ///< "pressure_ratio"
+[[nodiscard]] units::Quantity quantityOf(EndKey key);
 
 /// "@3": the same as state 3 has of this quantity. States count from 1.
 struct SameAs {
@@ -37,13 +41,17 @@ struct End {
 enum class Thermal { isothermal, adiabatic };
 enum class Spacing { ratio, pressure };
 
-struct Isothermal {};
-struct Isobaric {};
-struct Isochoric {};
+struct Isothermal {
+};
+struct Isobaric {
+};
+struct Isochoric {
+};
 struct Polytropic {
     std::optional<double> exponent; ///< none: from the two values of the end
 };
-struct Isentropic {};
+struct Isentropic {
+};
 struct Linear {
     std::optional<double> stiffness; ///< dp/dV [Pa/m³]; none: the end gives pressure and volume
 };

@@ -8,28 +8,30 @@
 #include <string>
 #include <string_view>
 
-namespace quasistat::units {
+namespace quasistat::units
+{
 
 /// The units a design is shown in. Empty string: the program chooses a readable prefix (bar, L, °C, J, …).
 struct DisplayUnits {
     std::string pressure = "bar";
     std::string volume = "L";
     std::string temperature = "°C";
-    std::string energy;   ///< "J", "kJ", …; empty: by magnitude
+    std::string energy;                     ///< "J", "kJ", …; empty: by magnitude
     double surroundingsPressure = 101325.0; ///< [Pa], for gauge units
-    bool workByGas = false; ///< display only: turns the sign of work and heat to "by the gas"
+    bool workByGas = false;                 ///< display only: turns the sign of work and heat to "by the gas"
 };
 
 /// One column's choice: the unit, the factor and offset to it from SI, the decimals that every figure of it gets.
 struct Scale {
-    std::string unit;      ///< as printed: "kJ", "°C", "bar"
-    double factor = 1.0;   ///< shown = value · factor + offset
+    std::string unit;    ///< as printed: "kJ", "°C", "bar"
+    double factor = 1.0; ///< shown = value · factor + offset
     double offset = 0.0;
     int decimals = 3;
 };
 
-/// A scale that shows the largest of `values` [SI] with at least 4 significant digits (5 where it reads well) in a readable
-/// prefix, or in the unit of `units` for that quantity. Non-finite values are ignored; none: the unit's default.
+/// A scale that shows the largest of `values` [SI] with at least 4 significant digits (5 where it reads well) in a
+/// readable prefix, or in the unit of `units` for that quantity. Non-finite values are ignored; none: the unit's
+/// default.
 [[nodiscard]] Scale scaleFor(Quantity quantity, std::span<const double> values, const DisplayUnits &units);
 
 /// Digits only, with U+2212, at the scale's decimals; "−0.00" is printed as "0.00".

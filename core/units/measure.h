@@ -8,14 +8,15 @@
 #include <string>
 #include <string_view>
 
-namespace quasistat::units {
+namespace quasistat::units
+{
 
 /// How a stated uncertainty is to be read (format of the document, "Quantity").
 enum class Distribution { normal, uniform, triangular };
 
 /// Standard uncertainty [SI unit of the quantity; a difference where the unit has an offset].
 struct Uncertainty {
-    double standard = 0.0;                         ///< already divided by k, √3 or √6
+    double standard = 0.0; ///< already divided by k, √3 or √6
     Distribution distribution = Distribution::normal;
 };
 
@@ -54,8 +55,10 @@ struct Conversion {
 };
 [[nodiscard]] Outcome<double> siValue(const Measure &measure, const Conversion &conversion);
 
-/// `value` [SI] in `unit` (same rules as `measured`, without a number). For gauge units relative to `surroundingsPressure`.
-[[nodiscard]] Outcome<double> inUnit(double value, Quantity quantity, std::string_view unit, double surroundingsPressure);
+/// `value` [SI] in `unit` (same rules as `measured`, without a number). For gauge units relative to
+/// `surroundingsPressure`.
+[[nodiscard]] Outcome<double> inUnit(double value, Quantity quantity, std::string_view unit,
+                                     double surroundingsPressure);
 
 /// `value` [SI] as text in `unit`, with as few digits as give it back to `significantDigits`: what a field or a dragged
 /// handle writes into the document. ASCII minus and '.', a blank before the unit: "8.372 bar".

@@ -4,26 +4,27 @@
 #include <array>
 #include <string_view>
 
-namespace quasistat::units {
+namespace quasistat::units
+{
 
 enum class Quantity {
-    number,                ///< a plain ratio, exponent or efficiency
-    pressure,              ///< absolute
+    number,   ///< a plain ratio, exponent or efficiency
+    pressure, ///< absolute
     pressureDifference,
-    temperature,           ///< thermodynamic
+    temperature, ///< thermodynamic
     temperatureDifference,
     volume,
-    amount,                ///< amount of substance; a mass or a standard volume is accepted where an amount is typed
+    amount, ///< amount of substance; a mass or a standard volume is accepted where an amount is typed
     mass,
     molarMass,
-    energy,                ///< work, heat, internal energy, enthalpy
+    energy, ///< work, heat, internal energy, enthalpy
     power,
-    entropy,               ///< also heat capacity of a body
+    entropy, ///< also heat capacity of a body
     molarEnergy,
-    molarEntropy,          ///< also molar heat capacity
+    molarEntropy, ///< also molar heat capacity
     specificEntropy,
-    frequency,             ///< cycles in time: 600 1/min
-    stiffness,             ///< dp/dV
+    frequency, ///< cycles in time: 600 1/min
+    stiffness, ///< dp/dV
     length,
     area,
     duration,
@@ -68,7 +69,8 @@ inline constexpr std::array quantityTable{
     return quantityTable[static_cast<std::size_t>(quantity)];
 }
 
-namespace detail {
+namespace detail
+{
 constexpr bool tableIsInOrder()
 {
     for (std::size_t i = 0; i < quantityTable.size(); ++i)
