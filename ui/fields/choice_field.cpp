@@ -3,7 +3,8 @@
 #include <QPainter>
 #include <QWheelEvent>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 void ChoiceField::paintEvent(QPaintEvent *event)
 {
@@ -19,8 +20,10 @@ void ChoiceField::paintEvent(QPaintEvent *event)
 
 void ChoiceField::wheelEvent(QWheelEvent *event)
 {
-    if (hasFocus()) QComboBox::wheelEvent(event);
-    else event->ignore();
+    if (hasFocus())
+        QComboBox::wheelEvent(event);
+    else
+        event->ignore();
 }
 
 } // namespace quasistat::ui

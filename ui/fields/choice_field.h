@@ -3,9 +3,11 @@
 
 #include <QComboBox>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-class ChoiceField : public QComboBox {
+class ChoiceField : public QComboBox
+{
     Q_OBJECT
 public:
     using QComboBox::QComboBox;

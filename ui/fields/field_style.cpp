@@ -1,8 +1,10 @@
 #include "ui/fields/field_style.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
 /// The style sheet; @name stands for a colour.
 constexpr const char *sheet = R"(
@@ -69,8 +71,7 @@ QString fieldStyle(const Palette &look)
         {"@scroll", faded(look.ink, 0.22)},
     };
     QString result = QString::fromLatin1(sheet);
-    for (const auto &[name, colour] : colours)
-        result.replace(QLatin1String(name), css(colour));
+    for (const auto &[name, colour] : colours) result.replace(QLatin1String(name), css(colour));
     return result;
 }
 

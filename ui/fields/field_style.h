@@ -5,10 +5,11 @@
 
 #include <QString>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-/// For the top of the widget tree. Labels with the property "role" = secondary, error or warning take that colour; a button
-/// with "role" = primary is the one primary action, "quiet" a text to click.
+/// For the top of the widget tree. Labels with the property "role" = secondary, error or warning take that colour; a
+/// button with "role" = primary is the one primary action, "quiet" a text to click.
 [[nodiscard]] QString fieldStyle(const Palette &palette);
 
 } // namespace quasistat::ui

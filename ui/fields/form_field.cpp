@@ -6,9 +6,11 @@
 #include <QCoreApplication>
 #include <QRegularExpression>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
 QString sentenceOf(const Failure &failure)
 {

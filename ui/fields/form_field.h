@@ -10,7 +10,8 @@
 #include <string>
 #include <vector>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// What a field takes.
 enum class FieldContent {

@@ -10,9 +10,11 @@
 #include <QGridLayout>
 #include <QSignalBlocker>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
 constexpr int fieldHeight = 28;
 constexpr int lineGap = 4; // 32 px from line to line
@@ -39,8 +41,8 @@ FormView::FormView(QWidget *parent) : QWidget(parent), m_look(ui::palette(Scheme
 void FormView::setForm(const std::vector<FormField> &fields, int columns)
 {
     const auto same = [](const Line &line, const FormField &field) { return sameShape(line.field, field); };
-    const bool fits = columns == m_columns &&
-                      std::equal(m_lines.begin(), m_lines.end(), fields.begin(), fields.end(), same);
+    const bool fits =
+        columns == m_columns && std::equal(m_lines.begin(), m_lines.end(), fields.begin(), fields.end(), same);
     if (!fits) build(fields, columns);
     update(fields);
 }
@@ -143,9 +145,8 @@ void FormView::buildChoice(Line &line)
     }
     // The list opens as wide as its longest words, though the closed field is narrow.
     line.choice->view()->setMinimumWidth(line.choice->view()->sizeHintForColumn(0) + 32);
-    connect(line.choice, &QComboBox::activated, this, [this, id, choice = line.choice](int index) {
-        emit chosen(id, choice->itemData(index).toString());
-    });
+    connect(line.choice, &QComboBox::activated, this,
+            [this, id, choice = line.choice](int index) { emit chosen(id, choice->itemData(index).toString()); });
 }
 
 void FormView::buildValue(Line &line)

@@ -12,11 +12,13 @@
 
 class QGridLayout;
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 class TextField;
 
-class FormView : public QWidget {
+class FormView : public QWidget
+{
     Q_OBJECT
 public:
     explicit FormView(QWidget *parent = nullptr);

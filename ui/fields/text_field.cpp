@@ -3,7 +3,8 @@
 #include <QFocusEvent>
 #include <QKeyEvent>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 TextField::TextField(QWidget *parent) : QLineEdit(parent) {}
 

@@ -1,12 +1,14 @@
 #pragma once
-// A line of text that a person edits in place: what is typed is offered while typing, entered by Enter or by leaving, and
-// taken back by Esc.
+// A line of text that a person edits in place: what is typed is offered while typing, entered by Enter or by leaving,
+// and taken back by Esc.
 
 #include <QLineEdit>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-class TextField : public QLineEdit {
+class TextField : public QLineEdit
+{
     Q_OBJECT
 public:
     explicit TextField(QWidget *parent = nullptr);

@@ -5,9 +5,11 @@
 
 #include <cmath>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
 /// Lays the text out in lines and hands each to `visit(line, text, isLast)`.
 template <class Visit>

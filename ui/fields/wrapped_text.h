@@ -4,7 +4,8 @@
 #include <QFont>
 #include <QPainter>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// Height [px] of `text` wrapped to `width`.
 [[nodiscard]] double wrappedHeight(const QString &text, const QFont &font, double width);

@@ -6,15 +6,20 @@
 
 #include <cmath>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using analysis::Limit;
 using analysis::Verdict;
 using analysis::Violation;
 
-namespace {
+namespace
+{
 
-QString say(const char *text) { return QCoreApplication::translate("Verdict", text); }
+QString say(const char *text)
+{
+    return QCoreApplication::translate("Verdict", text);
+}
 
 QString shownValue(const Limit &limit, double value, const units::DisplayUnits &units)
 {
@@ -79,7 +84,8 @@ QString stretchWords(const Violation &violation, const path::SegmentResult &segm
     case Reach::atStart: return say("at the start of segment %1").arg(violation.segment);
     case Reach::atEnd: return say("at the end of segment %1").arg(violation.segment);
     case Reach::toEnd:
-        return (rises(stretch.front(), stretch.back(), segment) ? say("above %1 on segment %2") : say("below %1 on segment %2"))
+        return (rises(stretch.front(), stretch.back(), segment) ? say("above %1 on segment %2")
+                                                                : say("below %1 on segment %2"))
             .arg(placeOf(stretch.front(), segment, units))
             .arg(violation.segment);
     case Reach::fromStart:
@@ -127,7 +133,8 @@ QString worstFigure(const Limit &limit, const Verdict &verdict, const units::Dis
     return verdict.worst ? shownValue(limit, *verdict.worst, units) : QString();
 }
 
-QString verdictSentence(const analysis::Evaluation &evaluation, const Verdict &verdict, const units::DisplayUnits &units)
+QString verdictSentence(const analysis::Evaluation &evaluation, const Verdict &verdict,
+                        const units::DisplayUnits &units)
 {
     if (verdict.ok) return {};
     QStringList places;
@@ -136,8 +143,7 @@ QString verdictSentence(const analysis::Evaluation &evaluation, const Verdict &v
             places << stretchWords(violation, *segment, units);
     if (places.isEmpty()) return say("Exceeded%1.").arg(worstPlace(verdict));
     QString list = places.takeFirst();
-    while (!places.isEmpty())
-        list += (places.size() == 1 ? say(", and %1") : say(", %1")).arg(places.takeFirst());
+    while (!places.isEmpty()) list += (places.size() == 1 ? say(", and %1") : say(", %1")).arg(places.takeFirst());
     return say("Exceeded %1%2.").arg(list, worstPlace(verdict));
 }
 
@@ -154,8 +160,10 @@ QString passingSentence(const analysis::Evaluation &evaluation, const Verdict &v
         const QString value = allowed ? roundFigure(limit, *allowed, units) : limitName(limit);
         switch (reachOf(violation, *result)) {
         case Reach::toEnd:
-        case Reach::within: return say("Passes %1 at %2.").arg(value, placeOf(violation.stretch.front(), *result, units));
-        case Reach::fromStart: return say("Beyond %1 until %2.").arg(value, placeOf(violation.stretch.back(), *result, units));
+        case Reach::within:
+            return say("Passes %1 at %2.").arg(value, placeOf(violation.stretch.front(), *result, units));
+        case Reach::fromStart:
+            return say("Beyond %1 until %2.").arg(value, placeOf(violation.stretch.back(), *result, units));
         case Reach::atStart: return say("Beyond %1 at its start.").arg(value);
         case Reach::atEnd: return say("Beyond %1 at its end.").arg(value);
         case Reach::whole: return say("Beyond %1 all along.").arg(value);

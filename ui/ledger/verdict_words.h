@@ -5,7 +5,8 @@
 #include "core/units/display.h"
 #include "ui/look/rich_text.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// "<i>T</i> ≤ 140 °C", as marked text.
 [[nodiscard]] QString limitTerms(const analysis::Limit &limit, const units::DisplayUnits &units);
@@ -14,12 +15,13 @@ namespace quasistat::ui {
 [[nodiscard]] QString worstFigure(const analysis::Limit &limit, const analysis::Verdict &verdict,
                                   const units::DisplayUnits &units);
 
-/// "Exceeded above 8.372 bar on segment 3, and at the start of segment 4; worst at state 4." Empty where the limit holds.
+/// "Exceeded above 8.372 bar on segment 3, and at the start of segment 4; worst at state 4." Empty where the limit
+/// holds.
 [[nodiscard]] QString verdictSentence(const analysis::Evaluation &evaluation, const analysis::Verdict &verdict,
                                       const units::DisplayUnits &units);
 
 /// For the card of `segment` (from 0): "Passes 140 °C at 8.372 bar." Empty where the limit holds on it.
-[[nodiscard]] QString passingSentence(const analysis::Evaluation &evaluation, const analysis::Verdict &verdict, int segment,
-                                      const units::DisplayUnits &units);
+[[nodiscard]] QString passingSentence(const analysis::Evaluation &evaluation, const analysis::Verdict &verdict,
+                                      int segment, const units::DisplayUnits &units);
 
 } // namespace quasistat::ui

@@ -2,16 +2,23 @@
 
 #include "ui/session/session.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 DesignCommand::DesignCommand(Session &session, Change change, const QString &text, int mergeId)
     : QUndoCommand(text), m_session(session), m_change(std::move(change)), m_mergeId(mergeId)
 {
 }
 
-void DesignCommand::undo() { m_session.show(m_change.before); }
+void DesignCommand::undo()
+{
+    m_session.show(m_change.before);
+}
 
-void DesignCommand::redo() { m_session.show(m_change.after); }
+void DesignCommand::redo()
+{
+    m_session.show(m_change.after);
+}
 
 bool DesignCommand::mergeWith(const QUndoCommand *other)
 {

@@ -5,12 +5,14 @@
 
 #include <QUndoCommand>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 class Session;
 
 /// Steps with the same merge id ≥ 0 in a row become one; a step that changed nothing in the end goes away.
-class DesignCommand : public QUndoCommand {
+class DesignCommand : public QUndoCommand
+{
 public:
     struct Change {
         document::Design before;

@@ -2,16 +2,21 @@
 
 #include <charconv>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using document::Design;
 using document::Json;
 
-namespace {
+namespace
+{
 
 constexpr std::string_view segmentsPrefix = "/segments/";
 
-Json::json_pointer pointerOf(const std::string &pointer) { return Json::json_pointer(pointer); }
+Json::json_pointer pointerOf(const std::string &pointer)
+{
+    return Json::json_pointer(pointer);
+}
 
 } // namespace
 
@@ -41,7 +46,10 @@ QString typed(const Json *value)
     return {};
 }
 
-QString typedAt(const Json &json, const std::string &pointer) { return typed(valueAt(json, pointer)); }
+QString typedAt(const Json &json, const std::string &pointer)
+{
+    return typed(valueAt(json, pointer));
+}
 
 Design withValue(const Design &design, const std::string &pointer, Json value)
 {

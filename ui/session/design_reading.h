@@ -5,7 +5,8 @@
 
 #include <QString>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// Number of entries of "segments"; 0 where there is no such array.
 [[nodiscard]] int segmentCount(const document::Design &design);
@@ -21,11 +22,13 @@ namespace quasistat::ui {
 [[nodiscard]] QString typedAt(const document::Json &json, const std::string &pointer);
 
 /// `design` with `value` at `pointer`; objects on the way are made, never an entry of an array.
-[[nodiscard]] document::Design withValue(const document::Design &design, const std::string &pointer, document::Json value);
+[[nodiscard]] document::Design withValue(const document::Design &design, const std::string &pointer,
+                                         document::Json value);
 /// `design` without what is at `pointer`; unchanged where nothing is.
 [[nodiscard]] document::Design withoutValue(const document::Design &design, const std::string &pointer);
 /// Sets `text` as a string, or removes the key where it is blank.
-[[nodiscard]] document::Design withText(const document::Design &design, const std::string &pointer, const QString &text);
+[[nodiscard]] document::Design withText(const document::Design &design, const std::string &pointer,
+                                        const QString &text);
 
 /// "/segments/3" + `key`.
 [[nodiscard]] std::string segmentPointer(int index, const std::string &key = {});

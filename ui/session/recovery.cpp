@@ -7,13 +7,18 @@
 #include <QStandardPaths>
 #include <QUuid>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using document::Design;
 
-namespace {
+namespace
+{
 
-QString lockOf(const QString &file) { return file + QStringLiteral(".lock"); }
+QString lockOf(const QString &file)
+{
+    return file + QStringLiteral(".lock");
+}
 
 std::unique_ptr<QLockFile> lockFor(const QString &file)
 {
@@ -60,7 +65,10 @@ bool Recovery::keep(const Design &design, const QString &path)
     return document::writeWhole(m_file.toStdString(), document::written(envelope)).ok();
 }
 
-void Recovery::discard() { QFile::remove(m_file); }
+void Recovery::discard()
+{
+    QFile::remove(m_file);
+}
 
 std::vector<LeftBehind> Recovery::leftBehind() const
 {

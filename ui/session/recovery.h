@@ -10,7 +10,8 @@
 #include <optional>
 #include <vector>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// Work left behind by a program that ended without saving.
 struct LeftBehind {
@@ -19,9 +20,10 @@ struct LeftBehind {
     document::Design design;
 };
 
-/// The recovery file of this window. Held by a lock as long as the program lives, so that a second window never offers the
-/// work of one that is still open.
-class Recovery {
+/// The recovery file of this window. Held by a lock as long as the program lives, so that a second window never offers
+/// the work of one that is still open.
+class Recovery
+{
 public:
     /// `folder` is made if it does not exist.
     explicit Recovery(const QString &folder);

@@ -5,12 +5,14 @@
 #include <array>
 #include <cmath>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using analysis::LimitQuantity;
 using units::Quantity;
 
-namespace {
+namespace
+{
 
 struct LimitFacts {
     LimitQuantity quantity;
@@ -21,7 +23,8 @@ struct LimitFacts {
 constexpr std::array limitTable{
     LimitFacts{LimitQuantity::pressure, Quantity::pressure, QT_TRANSLATE_NOOP("Limit", "pressure"), "<i>p</i>"},
     LimitFacts{LimitQuantity::volume, Quantity::volume, QT_TRANSLATE_NOOP("Limit", "volume"), "<i>V</i>"},
-    LimitFacts{LimitQuantity::temperature, Quantity::temperature, QT_TRANSLATE_NOOP("Limit", "temperature"), "<i>T</i>"},
+    LimitFacts{LimitQuantity::temperature, Quantity::temperature, QT_TRANSLATE_NOOP("Limit", "temperature"),
+               "<i>T</i>"},
     LimitFacts{LimitQuantity::pressureRatio, Quantity::number, QT_TRANSLATE_NOOP("Limit", "pressure ratio"),
                "<i>p</i><sub>max</sub>/<i>p</i><sub>min</sub>"},
     LimitFacts{LimitQuantity::work, Quantity::energy, QT_TRANSLATE_NOOP("Limit", "work"), "<i>W</i>"},
@@ -31,7 +34,10 @@ constexpr std::array limitTable{
                "<i>E</i><sub>stored</sub>"},
 };
 
-const LimitFacts &facts(LimitQuantity quantity) { return limitTable[static_cast<std::size_t>(quantity)]; }
+const LimitFacts &facts(LimitQuantity quantity)
+{
+    return limitTable[static_cast<std::size_t>(quantity)];
+}
 
 } // namespace
 
@@ -40,11 +46,20 @@ QString sentenceOf(const Message &message, const units::DisplayUnits &units)
     return QString::fromStdString(units::sentence(message, units));
 }
 
-QString sentenceOf(const Failure &failure, const units::DisplayUnits &units) { return sentenceOf(failure.message, units); }
+QString sentenceOf(const Failure &failure, const units::DisplayUnits &units)
+{
+    return sentenceOf(failure.message, units);
+}
 
-double shownSign(const units::DisplayUnits &units) { return units.workByGas ? -1.0 : 1.0; }
+double shownSign(const units::DisplayUnits &units)
+{
+    return units.workByGas ? -1.0 : 1.0;
+}
 
-QString figure(double value, const units::Scale &scale) { return QString::fromStdString(units::digits(value, scale)); }
+QString figure(double value, const units::Scale &scale)
+{
+    return QString::fromStdString(units::digits(value, scale));
+}
 
 QString figureWithUnit(double value, const units::Scale &scale)
 {
@@ -67,10 +82,19 @@ QString limitName(const analysis::Limit &limit)
     return limit.label.empty() ? limitQuantityWords(limit.quantity) : QString::fromStdString(limit.label);
 }
 
-QString limitQuantityWords(LimitQuantity quantity) { return QCoreApplication::translate("Limit", facts(quantity).words); }
+QString limitQuantityWords(LimitQuantity quantity)
+{
+    return QCoreApplication::translate("Limit", facts(quantity).words);
+}
 
-Quantity limitUnitQuantity(LimitQuantity quantity) { return facts(quantity).unit; }
+Quantity limitUnitQuantity(LimitQuantity quantity)
+{
+    return facts(quantity).unit;
+}
 
-QString limitSymbol(LimitQuantity quantity) { return QString::fromUtf8(facts(quantity).symbol); }
+QString limitSymbol(LimitQuantity quantity)
+{
+    return QString::fromUtf8(facts(quantity).symbol);
+}
 
 } // namespace quasistat::ui

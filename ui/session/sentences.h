@@ -7,7 +7,8 @@
 
 #include <QString>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 [[nodiscard]] QString sentenceOf(const Failure &failure, const units::DisplayUnits &units);
 [[nodiscard]] QString sentenceOf(const Message &message, const units::DisplayUnits &units);

@@ -3,14 +3,18 @@
 #include "ui/session/design_command.h"
 #include "ui/session/design_reading.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 Session::Session(QObject *parent) : QObject(parent), m_snapshot(std::make_shared<const Snapshot>())
 {
     connect(&m_undo, &QUndoStack::cleanChanged, this, &Session::fileChanged);
 }
 
-void Session::open(document::Design design, const QString &path) { replace(std::move(design), path, true); }
+void Session::open(document::Design design, const QString &path)
+{
+    replace(std::move(design), path, true);
+}
 
 void Session::openUnsaved(document::Design design, const QString &path)
 {
@@ -18,7 +22,10 @@ void Session::openUnsaved(document::Design design, const QString &path)
     m_undo.resetClean();
 }
 
-void Session::close() { replace({}, {}, false); }
+void Session::close()
+{
+    replace({}, {}, false);
+}
 
 void Session::replace(document::Design design, const QString &path, bool hasDesign)
 {

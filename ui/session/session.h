@@ -1,5 +1,6 @@
 #pragma once
-// The one open design: its undo stack, its evaluation, what is selected. Every view reads from here and edits through here.
+// The one open design: its undo stack, its evaluation, what is selected. Every view reads from here and edits through
+// here.
 
 #include "core/analysis/evaluation.h"
 #include "core/document/edit.h"
@@ -10,12 +11,13 @@
 
 #include <memory>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using EvaluationPtr = std::shared_ptr<const analysis::Evaluation>;
 
-/// What the views show: a design and what came of it. `evaluation` is null where the document as a whole cannot be computed;
-/// `failure` then says why. A faulty segment alone is a failure inside the evaluation.
+/// What the views show: a design and what came of it. `evaluation` is null where the document as a whole cannot be
+/// computed; `failure` then says why. A faulty segment alone is a failure inside the evaluation.
 struct Snapshot {
     document::Design design;
     EvaluationPtr evaluation;
@@ -27,7 +29,8 @@ using SnapshotPtr = std::shared_ptr<const Snapshot>;
 /// `selected` of a session when the start state, not a segment, is chosen.
 inline constexpr int startSelected = -2;
 
-class Session : public QObject {
+class Session : public QObject
+{
     Q_OBJECT
 public:
     explicit Session(QObject *parent = nullptr);

@@ -2,7 +2,8 @@
 
 #include <QFileInfo>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 void Settings::rememberFile(const QString &path)
 {
@@ -11,8 +12,7 @@ void Settings::rememberFile(const QString &path)
     QStringList files = value(settings::recentFiles);
     files.removeAll(absolute);
     files.prepend(absolute);
-    while (files.size() > kept)
-        files.removeLast();
+    while (files.size() > kept) files.removeLast();
     set(settings::recentFiles, files);
     set(settings::lastFolder, QFileInfo(absolute).absolutePath());
 }

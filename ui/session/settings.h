@@ -5,7 +5,8 @@
 #include <QSettings>
 #include <QStringList>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// One remembered value: its key and what holds before anybody has chosen.
 template <class T>
@@ -14,7 +15,8 @@ struct Setting {
     T fallback;
 };
 
-namespace settings {
+namespace settings
+{
 inline const Setting<QStringList> recentFiles{QLatin1String("recentFiles"), {}};
 inline const Setting<QByteArray> windowGeometry{QLatin1String("windowGeometry"), {}};
 inline const Setting<int> ledgerWidth{QLatin1String("ledgerWidth"), 340};
@@ -22,7 +24,8 @@ inline const Setting<QString> scheme{QLatin1String("scheme"), QStringLiteral("sy
 inline const Setting<QString> lastFolder{QLatin1String("lastFolder"), {}};
 } // namespace settings
 
-class Settings {
+class Settings
+{
 public:
     /// The user's own file, by organisation and application name.
     Settings() = default;

@@ -7,11 +7,16 @@
 
 #include <algorithm>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
-QString say(const char *text) { return QCoreApplication::translate("Strip", text); }
+QString say(const char *text)
+{
+    return QCoreApplication::translate("Strip", text);
+}
 
 /// Index of the failed segment that later ones wait for; −1: none.
 int firstFailed(const path::PathResult &path)
@@ -54,8 +59,9 @@ void giveFigures(CardFace &face, const path::SegmentResult &result, const Snapsh
     if (!result.audit.ok) {
         face.standing = CardStanding::failedAudit;
         face.mark = say("audit");
-        face.sentence = say("The two routes differ by %1.")
-                            .arg(shownFigure(std::abs(result.audit.firstLawResidual), units::Quantity::energy, snapshot.units));
+        face.sentence =
+            say("The two routes differ by %1.")
+                .arg(shownFigure(std::abs(result.audit.firstLawResidual), units::Quantity::energy, snapshot.units));
     } else if (!limit.isEmpty()) {
         face.standing = CardStanding::warned;
         face.mark = limit;
@@ -74,7 +80,8 @@ CardFace faceOf(const document::Json &segment, int index, const Snapshot &snapsh
     const path::SegmentResult *result = path && at < path->segments.size() ? &path->segments[at] : nullptr;
     const RichText words = kindWords(segment, result);
     if (words.unstyled() != face.title) face.second = words;
-    if (result) giveFigures(face, *result, snapshot, scale);
+    if (result)
+        giveFigures(face, *result, snapshot, scale);
     else if (path && at < path->failures.size() && path->failures[at])
         giveFailure(face, *path->failures[at], *path, snapshot.units);
     else {
@@ -104,8 +111,7 @@ StripFaces stripFaces(const Snapshot &snapshot)
             energies.push_back(result.work);
             energies.push_back(result.heat);
         }
-    for (const double energy : energies)
-        faces.scale.largest = std::max(faces.scale.largest, std::abs(energy));
+    for (const double energy : energies) faces.scale.largest = std::max(faces.scale.largest, std::abs(energy));
     units::Scale scale = units::scaleFor(units::Quantity::energy, energies, snapshot.units);
     if (scale.decimals > 1) --scale.decimals; // the ledger has them all; a card is read at a glance
     if (faces.scale.largest > 0.0)

@@ -8,7 +8,8 @@
 
 #include <QPainter>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// The standing of a segment, worst first where several hold.
 enum class CardStanding {
@@ -26,8 +27,8 @@ struct CardFace {
     RichText second; ///< the kind, where the title is a label
     RichText end;
     CardStanding standing = CardStanding::good;
-    QString mark;     ///< the limit's name, "audit"
-    QString sentence; ///< of an error, or what is waited for
+    QString mark;      ///< the limit's name, "audit"
+    QString sentence;  ///< of an error, or what is waited for
     double work = 0.0; ///< [J] into the gas, for the bar
     double heat = 0.0;
     QString workText;
@@ -60,10 +61,11 @@ struct CardPose {
 
 /// The place of the three dots that open the card's actions.
 [[nodiscard]] QRectF dotsPlace(const QRectF &card);
-void paintCard(QPainter &painter, const QRectF &card, const CardFace &face, const CardPose &pose, const StripScale &scale,
-               const Palette &look);
+void paintCard(QPainter &painter, const QRectF &card, const CardFace &face, const CardPose &pose,
+               const StripScale &scale, const Palette &look);
 
 /// The outline of a card: ground, edge by its standing and pose. Shared with the start's card.
-void paintCardGround(QPainter &painter, const QRectF &card, const CardPose &pose, const QColor &edge, const Palette &look);
+void paintCardGround(QPainter &painter, const QRectF &card, const CardPose &pose, const QColor &edge,
+                     const Palette &look);
 
 } // namespace quasistat::ui

@@ -1,15 +1,17 @@
+#include "ui/fields/wrapped_text.h"
 #include "ui/look/figure_text.h"
 #include "ui/look/glyph.h"
 #include "ui/look/mark.h"
 #include "ui/look/type.h"
 #include "ui/strip/card_face.h"
-#include "ui/fields/wrapped_text.h"
 
 #include <QPainterPath>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
 constexpr double inset = 10.0;
 constexpr double radius = 6.0;
@@ -25,8 +27,10 @@ QColor edgeOf(const CardFace &content, const CardPose &pose, const Palette &look
 
 void drawElided(QPainter &painter, QPointF at, const RichText &text, const QFont &font, double width)
 {
-    if (textWidth(text, font) <= width) drawText(painter, at, text, font);
-    else drawText(painter, at, elided(text.unstyled(), font, width), font);
+    if (textWidth(text, font) <= width)
+        drawText(painter, at, text, font);
+    else
+        drawText(painter, at, elided(text.unstyled(), font, width), font);
 }
 
 void paintHead(QPainter &painter, const QRectF &card, const CardFace &content, const Palette &look)
@@ -46,7 +50,8 @@ void paintHead(QPainter &painter, const QRectF &card, const CardFace &content, c
 }
 
 /// Draws the mark at the right and returns what is left of the line for the end's words.
-double paintMark(QPainter &painter, const QRectF &card, const CardFace &content, const CardPose &pose, const Palette &look)
+double paintMark(QPainter &painter, const QRectF &card, const CardFace &content, const CardPose &pose,
+                 const Palette &look)
 {
     const double y = card.top() + 51.5;
     const double right = card.right() - inset;
@@ -105,7 +110,8 @@ void paintFigure(QPainter &painter, QPointF right, const Bar &of, const Palette 
     const QString digits = of.text.section(QChar(0x202F), 0, 0);
     const double width = textWidth(of.text, labelFace());
     painter.setPen(QPen(look.error, 1.25));
-    painter.drawLine(QPointF(right.x() - width, right.y() - 4), QPointF(right.x() - width + textWidth(digits, labelFace()), right.y() - 4));
+    painter.drawLine(QPointF(right.x() - width, right.y() - 4),
+                     QPointF(right.x() - width + textWidth(digits, labelFace()), right.y() - 4));
 }
 
 void paintBar(QPainter &painter, const QRectF &card, const Bar &of, const CardPose &pose, const StripScale &scale,
@@ -123,14 +129,14 @@ void paintBar(QPainter &painter, const QRectF &card, const Bar &of, const CardPo
     paintFigure(painter, {card.right() - inset, of.top + 9.5}, of, look);
 }
 
-void paintBars(QPainter &painter, const QRectF &card, const CardFace &content, const CardPose &pose, const StripScale &scale,
-               const Palette &look)
+void paintBars(QPainter &painter, const QRectF &card, const CardFace &content, const CardPose &pose,
+               const StripScale &scale, const Palette &look)
 {
     const bool failed = content.standing == CardStanding::failedAudit;
-    paintBar(painter, card, {content.work, content.workText, QStringLiteral("W"), card.top() + 71, true, false}, pose, scale,
-             look);
-    paintBar(painter, card, {content.heat, content.heatText, QStringLiteral("Q"), card.top() + 91, false, failed}, pose, scale,
-             look);
+    paintBar(painter, card, {content.work, content.workText, QStringLiteral("W"), card.top() + 71, true, false}, pose,
+             scale, look);
+    paintBar(painter, card, {content.heat, content.heatText, QStringLiteral("Q"), card.top() + 91, false, failed}, pose,
+             scale, look);
     const double zero = card.left() + 28 + pose.halfBar;
     painter.setPen(QPen(faded(look.ink, 0.5), 1));
     painter.drawLine(QPointF(zero, card.top() + 68), QPointF(zero, card.top() + 106));
@@ -138,9 +144,13 @@ void paintBars(QPainter &painter, const QRectF &card, const CardFace &content, c
 
 } // namespace
 
-QRectF dotsPlace(const QRectF &card) { return {card.right() - 34, card.top() + 37, 34, 29}; }
+QRectF dotsPlace(const QRectF &card)
+{
+    return {card.right() - 34, card.top() + 37, 34, 29};
+}
 
-void paintCardGround(QPainter &painter, const QRectF &card, const CardPose &pose, const QColor &edge, const Palette &look)
+void paintCardGround(QPainter &painter, const QRectF &card, const CardPose &pose, const QColor &edge,
+                     const Palette &look)
 {
     const double width = pose.selected ? 2.0 : 1.0;
     QRectF outline = card.adjusted(width / 2, width / 2, -width / 2, -width / 2);
@@ -155,7 +165,8 @@ void paintCardGround(QPainter &painter, const QRectF &card, const CardPose &pose
     painter.restore();
     if (pose.unfolded) {
         painter.setPen(QPen(faded(look.ink, 0.14), 1));
-        painter.drawLine(QPointF(card.left() + inset, card.top() + 0.5), QPointF(card.right() - inset, card.top() + 0.5));
+        painter.drawLine(QPointF(card.left() + inset, card.top() + 0.5),
+                         QPointF(card.right() - inset, card.top() + 0.5));
     }
     if (pose.focused && !pose.unfolded) {
         painter.setPen(QPen(look.accent, 1, Qt::DotLine));
@@ -164,8 +175,8 @@ void paintCardGround(QPainter &painter, const QRectF &card, const CardPose &pose
     }
 }
 
-void paintCard(QPainter &painter, const QRectF &card, const CardFace &content, const CardPose &pose, const StripScale &scale,
-               const Palette &look)
+void paintCard(QPainter &painter, const QRectF &card, const CardFace &content, const CardPose &pose,
+               const StripScale &scale, const Palette &look)
 {
     painter.setRenderHint(QPainter::Antialiasing);
     paintCardGround(painter, card, pose, edgeOf(content, pose, look), look);

@@ -13,9 +13,11 @@
 #include <QPainter>
 #include <QVBoxLayout>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
 constexpr int narrow = 264;
 constexpr int wide = 516;
@@ -37,11 +39,13 @@ const Failure *failureOf(const Snapshot &snapshot, int segment)
     return at < failures.size() && failures[at] ? &*failures[at] : nullptr;
 }
 
-QString endSentence(const path::SegmentResult &result, const std::vector<path::EndKey> &given, const units::DisplayUnits &units)
+QString endSentence(const path::SegmentResult &result, const std::vector<path::EndKey> &given,
+                    const units::DisplayUnits &units)
 {
     QStringList figures;
     const auto isGiven = [&](path::EndKey key) { return std::find(given.begin(), given.end(), key) != given.end(); };
-    if (!isGiven(path::EndKey::pressure)) figures << shownFigure(result.to.pressure(), units::Quantity::pressure, units);
+    if (!isGiven(path::EndKey::pressure))
+        figures << shownFigure(result.to.pressure(), units::Quantity::pressure, units);
     if (!isGiven(path::EndKey::temperature) && result.to.temperature())
         figures << shownFigure(*result.to.temperature(), units::Quantity::temperature, units);
     if (!isGiven(path::EndKey::volume)) figures << shownFigure(result.to.volume(), units::Quantity::volume, units);
@@ -64,8 +68,7 @@ QString warningsOf(const Snapshot &snapshot, int segment)
         sentences << passingSentence(*snapshot.evaluation, verdict, segment, snapshot.units);
     if (const auto *result = resultOf(snapshot, segment)) {
         if (!result->audit.ok) sentences << CardPanel::tr("The two routes to its heat differ; the ledger shows both.");
-        for (const Message &warning : result->warnings)
-            sentences << sentenceOf(warning, snapshot.units);
+        for (const Message &warning : result->warnings) sentences << sentenceOf(warning, snapshot.units);
     }
     sentences.removeAll(QString());
     return sentences.join(QLatin1Char(' '));
@@ -170,8 +173,10 @@ void CardPanel::showNotes()
     } else if (const Failure *failure = failureOf(now, segment)) {
         const auto form = segmentForm(*segmentAt(now.design, segment), failure->reason == Reason::ambiguous);
         const QString field = fieldAt(form, segmentPointer(segment), failure->pointer);
-        if (field.isEmpty()) error = sentenceOf(*failure, now.units);
-        else atFields.insert(field, sentenceOf(*failure, now.units));
+        if (field.isEmpty())
+            error = sentenceOf(*failure, now.units);
+        else
+            atFields.insert(field, sentenceOf(*failure, now.units));
     } else if (const auto *result = resultOf(now, segment)) {
         warning = warningsOf(now, segment);
         remark = endSentence(*result, endKeysOf(*segmentAt(now.design, segment)), now.units);
@@ -198,12 +203,17 @@ document::Design CardPanel::edited(const QString &id, const QString &text) const
     return withValue(base, segmentPointer(segment), segmentEntered(*segmentAt(base, segment), *field, text));
 }
 
-void CardPanel::type(const QString &id, const QString &text) { m_session.preview(edited(id, text)); }
+void CardPanel::type(const QString &id, const QString &text)
+{
+    m_session.preview(edited(id, text));
+}
 
 void CardPanel::enter(const QString &id, const QString &text)
 {
     const FormField *field = m_form->field(id);
-    const QString what = field->choices.empty() ? field->caption : tr("%1 of %2").arg(QString::fromStdString(field->chosen), field->caption);
+    const QString what = field->choices.empty()
+                             ? field->caption
+                             : tr("%1 of %2").arg(QString::fromStdString(field->chosen), field->caption);
     m_session.apply(edited(id, text), tr("Change %1").arg(what));
 }
 
@@ -244,7 +254,10 @@ bool CardPanel::event(QEvent *event)
     return QWidget::event(event);
 }
 
-void CardPanel::mousePressEvent(QMouseEvent *event) { event->accept(); }
+void CardPanel::mousePressEvent(QMouseEvent *event)
+{
+    event->accept();
+}
 
 void CardPanel::paintEvent(QPaintEvent *)
 {

@@ -1,15 +1,17 @@
 #pragma once
-// The fields of the selected card, unfolded upward over the canvas: every change is previewed while typing and becomes one
-// undo step when entered.
+// The fields of the selected card, unfolded upward over the canvas: every change is previewed while typing and becomes
+// one undo step when entered.
 
 #include "ui/fields/form_view.h"
 #include "ui/session/session.h"
 
 #include <QLabel>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-class CardPanel : public QWidget {
+class CardPanel : public QWidget
+{
     Q_OBJECT
 public:
     explicit CardPanel(Session &session, QWidget *parent = nullptr);
@@ -23,7 +25,7 @@ public:
     void focusFirst() { m_form->focusFirst(); }
 
 signals:
-    void resized();      ///< the fields or sentences need another height
+    void resized();       ///< the fields or sentences need another height
     void foldRequested(); ///< Esc with nothing to take back
 
 protected:

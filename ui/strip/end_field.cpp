@@ -4,12 +4,14 @@
 
 #include <array>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using path::EndKey;
 using units::Quantity;
 
-namespace {
+namespace
+{
 
 constexpr std::array endKeyTable{
     EndKeyFacts{EndKey::pressure, Quantity::pressure, QT_TRANSLATE_NOOP("EndKey", "pressure"), "p"},
@@ -47,7 +49,10 @@ double reached(const path::SegmentResult &result, EndKey key)
 
 } // namespace
 
-const EndKeyFacts &facts(EndKey key) { return endKeyTable[static_cast<std::size_t>(key)]; }
+const EndKeyFacts &facts(EndKey key)
+{
+    return endKeyTable[static_cast<std::size_t>(key)];
+}
 
 std::optional<EndKey> endKeyFrom(const std::string &key)
 {
@@ -56,7 +61,10 @@ std::optional<EndKey> endKeyFrom(const std::string &key)
     return {};
 }
 
-QString endKeyWords(EndKey key) { return QCoreApplication::translate("EndKey", facts(key).words); }
+QString endKeyWords(EndKey key)
+{
+    return QCoreApplication::translate("EndKey", facts(key).words);
+}
 
 std::optional<path::Process> processOf(const document::Json &segment)
 {
@@ -91,7 +99,8 @@ QString typedValue(double value, Quantity quantity, const units::DisplayUnits &u
 {
     constexpr int digits = 5;
     if (quantity == Quantity::number) return QString::number(value, 'g', digits);
-    const auto text = units::typedIn(value, quantity, unitFor(quantity, value, units), units.surroundingsPressure, digits);
+    const auto text =
+        units::typedIn(value, quantity, unitFor(quantity, value, units), units.surroundingsPressure, digits);
     return text ? QString::fromStdString(*text) : QString();
 }
 

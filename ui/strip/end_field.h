@@ -10,7 +10,8 @@
 
 #include <optional>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 struct EndKeyFacts {
     path::EndKey key;
@@ -30,7 +31,8 @@ struct EndKeyFacts {
 [[nodiscard]] std::vector<path::EndKey> endKeysOf(const document::Json &segment);
 
 /// The value a computed segment has of `key`, as it would be typed in the units shown: "8.372 bar".
-[[nodiscard]] QString reachedValue(const path::SegmentResult &result, path::EndKey key, const units::DisplayUnits &units);
+[[nodiscard]] QString reachedValue(const path::SegmentResult &result, path::EndKey key,
+                                   const units::DisplayUnits &units);
 
 /// `value` [SI] as it would be typed in the unit shown for its quantity.
 [[nodiscard]] QString typedValue(double value, units::Quantity quantity, const units::DisplayUnits &units);

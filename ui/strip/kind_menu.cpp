@@ -2,7 +2,8 @@
 
 #include "ui/look/glyph.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 void addKinds(QMenu &menu, const Palette &look, const std::function<void(path::Kind)> &choose)
 {

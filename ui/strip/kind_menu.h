@@ -7,7 +7,8 @@
 
 #include <functional>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// Adds an entry for each kind to `menu`; choosing one calls `choose`.
 void addKinds(QMenu &menu, const Palette &look, const std::function<void(path::Kind)> &choose);

@@ -8,9 +8,11 @@
 #include <QKeyEvent>
 #include <QScrollBar>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
 constexpr int margin = 16;
 constexpr int gap = 8;
@@ -23,7 +25,8 @@ constexpr int nextHeight = 78;
 
 } // namespace
 
-PathStrip::PathStrip(Session &session, QWidget *parent) : QWidget(parent), m_session(session), m_look(ui::palette(Scheme::light))
+PathStrip::PathStrip(Session &session, QWidget *parent)
+    : QWidget(parent), m_session(session), m_look(ui::palette(Scheme::light))
 {
     setFixedHeight(height);
     setAccessibleName(tr("Path"));
@@ -57,7 +60,10 @@ void PathStrip::createViews()
     connect(m_scroll->horizontalScrollBar(), &QScrollBar::valueChanged, this, &PathStrip::placed);
 }
 
-QWidget *PathStrip::placeNext() const { return m_next; }
+QWidget *PathStrip::placeNext() const
+{
+    return m_next;
+}
 
 void PathStrip::setLook(const Palette &look)
 {
@@ -74,7 +80,8 @@ void PathStrip::refresh()
         m_cards[k]->setAccessibleName(m_faces.cards[k].spoken());
         m_cards[k]->setToolTip(m_faces.cards[k].sentence);
     }
-    m_start->setAccessibleName(tr("start state: %1").arg(startWords(m_session.now().design).join(QStringLiteral(", "))));
+    m_start->setAccessibleName(
+        tr("start state: %1").arg(startWords(m_session.now().design).join(QStringLiteral(", "))));
     m_start->setToolTip(startFault(m_session.now()));
     layOut();
 }
@@ -86,8 +93,7 @@ void PathStrip::matchCards()
         m_cards.back()->deleteLater();
         m_cards.pop_back();
     }
-    while (m_cards.size() < m_faces.cards.size())
-        m_cards.push_back(createCard(static_cast<int>(m_cards.size())));
+    while (m_cards.size() < m_faces.cards.size()) m_cards.push_back(createCard(static_cast<int>(m_cards.size())));
 }
 
 StripCard *PathStrip::createCard(int segment)
@@ -97,7 +103,8 @@ StripCard *PathStrip::createCard(int segment)
     made->setDraggable(true);
     connect(made, &StripCard::clicked, this, [this, segment](const QPoint &at) { click(segment, at); });
     connect(made, &StripCard::menuRequested, this, [this, segment](const QPoint &at) { showMenu(segment, at); });
-    connect(made, &StripCard::hoverChanged, this, [this, segment](bool hovered) { m_session.hover(hovered ? segment : -1); });
+    connect(made, &StripCard::hoverChanged, this,
+            [this, segment](bool hovered) { m_session.hover(hovered ? segment : -1); });
     connect(made, &StripCard::dragged, this, [this, segment](int dx) { drag(segment, dx); });
     connect(made, &StripCard::dropped, this, [this, segment](int dx) { drop(segment, dx); });
     connect(made, &StripCard::dragCancelled, this, &PathStrip::endDrag);
@@ -182,8 +189,10 @@ void PathStrip::click(int segment, const QPoint &at)
     }
     const bool again = m_session.selected() == segment && m_unfolded;
     m_unfolded = !again;
-    if (m_session.selected() == segment) layOut();
-    else m_session.select(segment);
+    if (m_session.selected() == segment)
+        layOut();
+    else
+        m_session.select(segment);
 }
 
 void PathStrip::showMenu(int segment, const QPoint &globalAt)
@@ -275,7 +284,8 @@ void PathStrip::keyPressEvent(QKeyEvent *event)
     case Qt::Key_Return:
     case Qt::Key_Enter:
     case Qt::Key_Space:
-        if (m_next->hasFocus()) showKinds();
+        if (m_next->hasFocus())
+            showKinds();
         else {
             setUnfolded(true);
             emit fieldsRequested();

@@ -8,11 +8,13 @@
 #include <QScrollArea>
 #include <QWidget>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 class StripCard;
 
-class PathStrip : public QWidget {
+class PathStrip : public QWidget
+{
     Q_OBJECT
 public:
     static constexpr int height = 132;
@@ -39,8 +41,8 @@ public:
     void focusSelected();
 
 signals:
-    void placed();              ///< cards have moved or (un)folded: the fields over them must follow
-    void fieldsRequested();     ///< Enter on a card: the first field takes the keys
+    void placed();          ///< cards have moved or (un)folded: the fields over them must follow
+    void fieldsRequested(); ///< Enter on a card: the first field takes the keys
     void placeRequested(path::Kind kind);
 
 protected:

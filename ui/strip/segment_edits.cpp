@@ -4,11 +4,16 @@
 
 #include <QCoreApplication>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
-QString say(const char *text) { return QCoreApplication::translate("SegmentEdits", text); }
+QString say(const char *text)
+{
+    return QCoreApplication::translate("SegmentEdits", text);
+}
 
 bool exists(const Session &session, int segment)
 {
@@ -58,8 +63,9 @@ void moveSegment(Session &session, int from, int to)
 void changeKind(Session &session, int segment, path::Kind kind)
 {
     if (!exists(session, segment)) return;
-    session.apply(document::kindChanged(session.base().design, static_cast<std::size_t>(segment), kind, pathBefore(session)),
-                  say("Make segment %1 %2").arg(segment + 1).arg(kindName(kind)));
+    session.apply(
+        document::kindChanged(session.base().design, static_cast<std::size_t>(segment), kind, pathBefore(session)),
+        say("Make segment %1 %2").arg(segment + 1).arg(kindName(kind)));
 }
 
 void insertSegment(Session &session, int index, path::Kind kind)

@@ -3,7 +3,8 @@
 
 #include "ui/session/session.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// `segment` counts from 0; one that does not exist is left alone.
 void duplicateSegment(Session &session, int segment);

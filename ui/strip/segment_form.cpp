@@ -2,28 +2,34 @@
 
 #include "ui/strip/end_field.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using document::Json;
 using path::EndKey;
 using path::Kind;
 using units::Quantity;
 
-namespace {
+namespace
+{
 
-QString words(const char *text) { return QCoreApplication::translate("SegmentForm", text); }
+QString words(const char *text)
+{
+    return QCoreApplication::translate("SegmentForm", text);
+}
 
 FormField kindField(const Json &segment)
 {
     FormField field{.id = "kind", .caption = words(QT_TRANSLATE_NOOP("SegmentForm", "kind"))};
     for (const path::KindFacts &entry : path::kindTable)
-        field.choices.push_back({std::string(entry.key), QString::fromUtf8(entry.words.data(), qsizetype(entry.words.size())), entry.kind});
+        field.choices.push_back(
+            {std::string(entry.key), QString::fromUtf8(entry.words.data(), qsizetype(entry.words.size())), entry.kind});
     field.chosen = typedAt(segment, "/kind").toStdString();
     return field;
 }
 
-FormField valueField(std::string id, const char *caption, FieldContent content, std::string pointer, const Json &segment,
-                     Quantity quantity = Quantity::number)
+FormField valueField(std::string id, const char *caption, FieldContent content, std::string pointer,
+                     const Json &segment, Quantity quantity = Quantity::number)
 {
     FormField field{.id = std::move(id), .caption = words(caption)};
     field.content = content;
@@ -43,7 +49,8 @@ FormField choiceField(std::string id, const char *caption, const Json &segment, 
 
 FormField polytropicLaw(const Json &segment)
 {
-    FormField field = valueField("law", QT_TRANSLATE_NOOP("SegmentForm", "law"), FieldContent::none, "/exponent", segment);
+    FormField field =
+        valueField("law", QT_TRANSLATE_NOOP("SegmentForm", "law"), FieldContent::none, "/exponent", segment);
     field.choices = {{"exponent", words(QT_TRANSLATE_NOOP("SegmentForm", "exponent"))},
                      {"points", words(QT_TRANSLATE_NOOP("SegmentForm", "from two ends"))}};
     field.chosen = valueAt(segment, "/exponent") ? "exponent" : "points";
@@ -53,8 +60,8 @@ FormField polytropicLaw(const Json &segment)
 
 FormField linearLaw(const Json &segment)
 {
-    FormField field = valueField("law", QT_TRANSLATE_NOOP("SegmentForm", "line"), FieldContent::none, "/stiffness", segment,
-                                 Quantity::stiffness);
+    FormField field = valueField("law", QT_TRANSLATE_NOOP("SegmentForm", "line"), FieldContent::none, "/stiffness",
+                                 segment, Quantity::stiffness);
     field.choices = {{"points", words(QT_TRANSLATE_NOOP("SegmentForm", "to a point"))},
                      {"stiffness", words(QT_TRANSLATE_NOOP("SegmentForm", "stiffness"))}};
     field.chosen = valueAt(segment, "/stiffness") ? "stiffness" : "points";
@@ -73,16 +80,17 @@ FormField thermalField(const Json &segment, bool isothermalFirst)
 void addExternalPressure(std::vector<FormField> &form, const Json &segment)
 {
     const bool loaded = valueAt(segment, "/load") != nullptr;
-    FormField field = valueField("external", QT_TRANSLATE_NOOP("SegmentForm", "against"), loaded ? FieldContent::quantity : FieldContent::quantityOrAt,
-                                 loaded ? "/load/mass" : "/external_pressure", segment,
-                                 loaded ? Quantity::mass : Quantity::pressure);
+    FormField field =
+        valueField("external", QT_TRANSLATE_NOOP("SegmentForm", "against"),
+                   loaded ? FieldContent::quantity : FieldContent::quantityOrAt,
+                   loaded ? "/load/mass" : "/external_pressure", segment, loaded ? Quantity::mass : Quantity::pressure);
     field.choices = {{"external_pressure", words(QT_TRANSLATE_NOOP("SegmentForm", "pressure"))},
                      {"load", words(QT_TRANSLATE_NOOP("SegmentForm", "loaded piston"))}};
     field.chosen = loaded ? "load" : "external_pressure";
     form.push_back(std::move(field));
     if (loaded)
-        form.push_back(valueField("bore", QT_TRANSLATE_NOOP("SegmentForm", "bore"), FieldContent::quantity, "/load/bore",
-                                  segment, Quantity::length));
+        form.push_back(valueField("bore", QT_TRANSLATE_NOOP("SegmentForm", "bore"), FieldContent::quantity,
+                                  "/load/bore", segment, Quantity::length));
 }
 
 void addOwnKeys(std::vector<FormField> &form, const Json &segment, Kind kind)
@@ -99,7 +107,8 @@ void addOwnKeys(std::vector<FormField> &form, const Json &segment, Kind kind)
         form.push_back(thermalField(segment, true));
         return;
     case Kind::stepped:
-        form.push_back(valueField("steps", QT_TRANSLATE_NOOP("SegmentForm", "steps"), FieldContent::count, "/steps", segment));
+        form.push_back(
+            valueField("steps", QT_TRANSLATE_NOOP("SegmentForm", "steps"), FieldContent::count, "/steps", segment));
         form.push_back(choiceField("spacing", QT_TRANSLATE_NOOP("SegmentForm", "spaced by"), segment,
                                    {{"ratio", words(QT_TRANSLATE_NOOP("SegmentForm", "equal ratios"))},
                                     {"pressure", words(QT_TRANSLATE_NOOP("SegmentForm", "equal differences"))}}));
@@ -122,12 +131,12 @@ FormField singleEnd(const Json &segment, const path::EndChoice &choice)
 {
     FormField field{.id = "end", .caption = words(QT_TRANSLATE_NOOP("SegmentForm", "end")), .pointer = "/end"};
     if (choice.needed == 0) field.choices.push_back({"balance", words(QT_TRANSLATE_NOOP("SegmentForm", "balance"))});
-    for (const EndKey key : choice.keys)
-        field.choices.push_back({std::string(path::keyOf(key)), endKeyWords(key)});
+    for (const EndKey key : choice.keys) field.choices.push_back({std::string(path::keyOf(key)), endKeyWords(key)});
     field.choices.push_back({"state", words(QT_TRANSLATE_NOOP("SegmentForm", "at state"))});
 
     const auto keys = endKeysOf(segment);
-    if (!keys.empty()) giveEndValue(field, segment, keys.front());
+    if (!keys.empty())
+        giveEndValue(field, segment, keys.front());
     else if (valueAt(segment, "/end/state")) {
         field.chosen = "state";
         field.pointer = "/end/state";
@@ -155,8 +164,10 @@ void addTwoEnds(std::vector<FormField> &form, const Json &segment, const path::E
 
 void addEnd(std::vector<FormField> &form, const Json &segment, const path::EndChoice &choice)
 {
-    if (choice.needed == 2 && !valueAt(segment, "/end/state")) addTwoEnds(form, segment, choice);
-    else form.push_back(singleEnd(segment, choice));
+    if (choice.needed == 2 && !valueAt(segment, "/end/state"))
+        addTwoEnds(form, segment, choice);
+    else
+        form.push_back(singleEnd(segment, choice));
 }
 
 FormField directionField(const Json &segment)
@@ -171,8 +182,10 @@ FormField directionField(const Json &segment)
 
 void setOrErase(Json &segment, const char *key, const std::string &value)
 {
-    if (value.empty()) segment.erase(key);
-    else segment[key] = value;
+    if (value.empty())
+        segment.erase(key);
+    else
+        segment[key] = value;
 }
 
 Json endValueOf(EndKey key, const FormContext &context)
@@ -205,8 +218,10 @@ void chooseEnd(Json &segment, const FormField &field, const std::string &key, co
     const Json value = endValueOf(*endKey, context);
     Json renamed = Json::object(); // keeps the order of two ends, where erase and insert would swap them
     for (const auto &[name, old] : endObject(segment).items()) {
-        if (name == field.chosen) renamed[key] = value;
-        else renamed[name] = old;
+        if (name == field.chosen)
+            renamed[key] = value;
+        else
+            renamed[name] = old;
     }
     renamed[key] = value;
     segment["end"] = renamed;
@@ -272,17 +287,22 @@ std::vector<FormField> segmentForm(const Json &segment, bool askDirection)
         addEnd(form, segment, path::endChoice(*process));
         if (askDirection || valueAt(segment, "/direction")) form.push_back(directionField(segment));
     }
-    form.push_back(valueField("label", QT_TRANSLATE_NOOP("SegmentForm", "label"), FieldContent::text, "/label", segment));
+    form.push_back(
+        valueField("label", QT_TRANSLATE_NOOP("SegmentForm", "label"), FieldContent::text, "/label", segment));
     return form;
 }
 
 Json segmentChosen(const Json &segment, const FormField &field, const std::string &key, const FormContext &context)
 {
     Json changed = segment;
-    if (field.id == "end" || field.id == "end2") chooseEnd(changed, field, key, context);
-    else if (field.id == "law") chooseLaw(changed, key, context);
-    else if (field.id == "external") chooseExternal(changed, key, context);
-    else setOrErase(changed, field.id.c_str(), key);
+    if (field.id == "end" || field.id == "end2")
+        chooseEnd(changed, field, key, context);
+    else if (field.id == "law")
+        chooseLaw(changed, key, context);
+    else if (field.id == "external")
+        chooseExternal(changed, key, context);
+    else
+        setOrErase(changed, field.id.c_str(), key);
     return changed;
 }
 
@@ -292,8 +312,10 @@ Json segmentEntered(const Json &segment, const FormField &field, const QString &
     const QString trimmed = text.trimmed();
     const Json::json_pointer place(field.pointer);
     if (field.content == FieldContent::text) {
-        if (trimmed.isEmpty()) changed.erase(field.id);
-        else changed[place] = trimmed.toStdString();
+        if (trimmed.isEmpty())
+            changed.erase(field.id);
+        else
+            changed[place] = trimmed.toStdString();
     } else if (field.content == FieldContent::quantity || field.content == FieldContent::quantityOrAt)
         changed[place] = trimmed.toStdString();
     else

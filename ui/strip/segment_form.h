@@ -6,7 +6,8 @@
 #include "ui/fields/form_field.h"
 #include "ui/session/design_reading.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 /// What new values are taken from when a choice changes: the segment as it was reached, if it was.
 struct FormContext {
@@ -19,8 +20,8 @@ struct FormContext {
 [[nodiscard]] std::vector<FormField> segmentForm(const document::Json &segment, bool askDirection);
 
 /// `segment` after `key` was chosen in `field` (any but "kind", which needs the whole design).
-[[nodiscard]] document::Json segmentChosen(const document::Json &segment, const FormField &field, const std::string &key,
-                                           const FormContext &context);
+[[nodiscard]] document::Json segmentChosen(const document::Json &segment, const FormField &field,
+                                           const std::string &key, const FormContext &context);
 /// `segment` after `text` was entered in `field`; a blank label goes away, other blanks stay to be reported.
 [[nodiscard]] document::Json segmentEntered(const document::Json &segment, const FormField &field, const QString &text);
 

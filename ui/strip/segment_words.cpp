@@ -3,16 +3,24 @@
 #include "ui/fields/form_field.h"
 #include "ui/strip/end_field.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using document::Json;
 using path::Kind;
 
-namespace {
+namespace
+{
 
-QString say(const char *text) { return QCoreApplication::translate("SegmentWords", text); }
+QString say(const char *text)
+{
+    return QCoreApplication::translate("SegmentWords", text);
+}
 
-std::optional<Kind> kindOf(const Json &segment) { return path::kindFromKey(typedAt(segment, "/kind").toStdString()); }
+std::optional<Kind> kindOf(const Json &segment)
+{
+    return path::kindFromKey(typedAt(segment, "/kind").toStdString());
+}
 
 QString kindName(const Json &segment)
 {
@@ -23,8 +31,14 @@ QString kindName(const Json &segment)
     return typedAt(segment, "/kind");
 }
 
-RichText marked(const QString &markup) { return RichText::marked(markup); }
-RichText plain(const QString &text) { return RichText::plain(text); }
+RichText marked(const QString &markup)
+{
+    return RichText::marked(markup);
+}
+RichText plain(const QString &text)
+{
+    return RichText::plain(text);
+}
 
 /// "10 bar", or the symbol of the state referred to: T₁.
 RichText valueWords(const QString &typedText, const char *symbol)

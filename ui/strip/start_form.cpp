@@ -5,18 +5,26 @@
 
 #include <array>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
 using document::Json;
 using units::Quantity;
 
-namespace {
+namespace
+{
 
 constexpr std::array startQuantities{Quantity::pressure, Quantity::temperature, Quantity::volume, Quantity::amount};
 
-QString say(const char *text) { return QCoreApplication::translate("StartForm", text); }
+QString say(const char *text)
+{
+    return QCoreApplication::translate("StartForm", text);
+}
 
-std::string keyOf(Quantity quantity) { return std::string(units::facts(quantity).key); }
+std::string keyOf(Quantity quantity)
+{
+    return std::string(units::facts(quantity).key);
+}
 
 QString wordsOf(Quantity quantity)
 {
@@ -92,8 +100,10 @@ document::Design startChosen(const Snapshot &snapshot, const FormField &field, c
     const QString value = state ? typedValue(valueIn(*state, *quantity), *quantity, snapshot.units) : QString();
     Json start = Json::object();
     for (const auto &[name, old] : snapshot.design.json["start"].items()) {
-        if (name == field.chosen) start[key] = value.toStdString();
-        else start[name] = old;
+        if (name == field.chosen)
+            start[key] = value.toStdString();
+        else
+            start[name] = old;
     }
     return withValue(snapshot.design, "/start", start);
 }
@@ -106,8 +116,7 @@ document::Design startEntered(const document::Design &design, const FormField &f
 QStringList startWords(const document::Design &design)
 {
     QStringList words;
-    for (const Quantity quantity : given(design))
-        words << printed(typedAt(design.json, "/start/" + keyOf(quantity)));
+    for (const Quantity quantity : given(design)) words << printed(typedAt(design.json, "/start/" + keyOf(quantity)));
     return words;
 }
 

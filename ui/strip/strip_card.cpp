@@ -5,19 +5,30 @@
 #include <QKeyEvent>
 #include <QMouseEvent>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-StripCard::StripCard(std::function<void(StripCard &)> paint, QWidget *parent) : QWidget(parent), m_paint(std::move(paint))
+StripCard::StripCard(std::function<void(StripCard &)> paint, QWidget *parent)
+    : QWidget(parent), m_paint(std::move(paint))
 {
     setFocusPolicy(Qt::StrongFocus);
     setCursor(Qt::PointingHandCursor);
 }
 
-void StripCard::paintEvent(QPaintEvent *) { m_paint(*this); }
+void StripCard::paintEvent(QPaintEvent *)
+{
+    m_paint(*this);
+}
 
-void StripCard::enterEvent(QEnterEvent *) { setHovered(true); }
+void StripCard::enterEvent(QEnterEvent *)
+{
+    setHovered(true);
+}
 
-void StripCard::leaveEvent(QEvent *) { setHovered(false); }
+void StripCard::leaveEvent(QEvent *)
+{
+    setHovered(false);
+}
 
 void StripCard::setHovered(bool hovered)
 {
@@ -56,7 +67,10 @@ void StripCard::mouseReleaseEvent(QMouseEvent *event)
         emit clicked(event->position().toPoint());
 }
 
-void StripCard::contextMenuEvent(QContextMenuEvent *event) { emit menuRequested(event->globalPos()); }
+void StripCard::contextMenuEvent(QContextMenuEvent *event)
+{
+    emit menuRequested(event->globalPos());
+}
 
 void StripCard::focusInEvent(QFocusEvent *event)
 {

@@ -5,9 +5,11 @@
 
 #include <functional>
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-class StripCard : public QWidget {
+class StripCard : public QWidget
+{
     Q_OBJECT
 public:
     /// `paint` draws the card into its rectangle, which starts at the origin.

@@ -5,9 +5,11 @@
 #include "ui/strip/start_form.h"
 #include "ui/strip/strip_card.h"
 
-namespace quasistat::ui {
+namespace quasistat::ui
+{
 
-namespace {
+namespace
+{
 
 void paintArrow(QPainter &painter, QPointF tail, double length)
 {
