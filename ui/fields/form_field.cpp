@@ -28,6 +28,7 @@ bool isReference(const QString &text)
 QString complaintOf(const FormField &field, const QString &text)
 {
     const QString trimmed = text.trimmed();
+    if (field.optional && trimmed.isEmpty()) return {};
     switch (field.content) {
     case FieldContent::none:
     case FieldContent::text: return {};

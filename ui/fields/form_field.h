@@ -39,6 +39,7 @@ struct FormField {
     units::Quantity quantity = units::Quantity::number;
     QString value{}; ///< as typed
     QString placeholder{};
+    bool optional = false; ///< may be left blank
 };
 
 /// Why `text` cannot stand in `field`, as a sentence; empty if it can. Judges the text alone, not what comes of it.

@@ -165,7 +165,8 @@ void FormView::buildValue(Line &line)
     });
     connect(line.value, &TextField::entered, this, [this, id](const QString &text) {
         Line *left = lineOf(id);
-        if (!m_rejectsInvalid || complaintOf(left->field, text).isEmpty()) emit entered(id, text);
+        if (m_rejectsInvalid && !complaintOf(left->field, text).isEmpty()) left->value->setModified(true);
+        else emit entered(id, text);
     });
     connect(line.value, &TextField::restored, this, [this, id] {
         say(*lineOf(id), {});
@@ -198,6 +199,20 @@ void FormView::setLook(const Palette &look)
             for (std::size_t i = 0; i < line.field.choices.size(); ++i)
                 if (const auto &glyph = line.field.choices[i].glyph)
                     line.choice->setItemIcon(static_cast<int>(i), glyphIcon(*glyph, look));
+}
+
+void FormView::refuse(const QString &id, const QString &sentence)
+{
+    Line *line = lineOf(id);
+    if (!line) return;
+    say(*line, sentence);
+    if (line->value) line->value->setModified(true);
+}
+
+void FormView::forgetTyping()
+{
+    for (const Line &line : m_lines)
+        if (line.value) line.value->setModified(false);
 }
 
 void FormView::setSentences(const QMap<QString, QString> &byId)

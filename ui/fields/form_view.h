@@ -33,6 +33,9 @@ public:
     void focusFirst();
     /// Enters the text that is being typed, as if its field were left.
     void finishTyping();
+    void forgetTyping(); ///< the next setForm shows what the document holds
+    /// The text of this field does not do: it stays with the sentence, as if still being typed.
+    void refuse(const QString &id, const QString &sentence);
     [[nodiscard]] int columns() const { return m_columns; }
 
     [[nodiscard]] TextField *valueOf(const QString &id) const;

@@ -17,6 +17,18 @@ void TextField::show(const QString &text)
     setCursorPosition(0);
 }
 
+bool TextField::event(QEvent *event)
+{
+    if (event->type() == QEvent::ShortcutOverride && !isModified()) {
+        const auto *key = static_cast<QKeyEvent *>(event);
+        if (key->matches(QKeySequence::Undo) || key->matches(QKeySequence::Redo)) {
+            event->ignore();
+            return false;
+        }
+    }
+    return QLineEdit::event(event);
+}
+
 void TextField::keyPressEvent(QKeyEvent *event)
 {
     switch (event->key()) {
@@ -46,7 +58,6 @@ void TextField::enter()
 {
     if (!isModified()) return;
     setModified(false);
-    m_shown = text();
     emit entered(text());
 }
 

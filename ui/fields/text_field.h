@@ -17,7 +17,8 @@ public:
     void show(const QString &text);
     using QLineEdit::show;
     void enter(); ///< as Enter: announces a changed text
-    [[nodiscard]] bool isBeingTyped() const { return hasFocus() && isModified(); }
+    /// Changed and neither entered nor taken back; also a text that was refused.
+    [[nodiscard]] bool isBeingTyped() const { return isModified(); }
 
 signals:
     void entered(const QString &text); ///< Enter, or focus left, after a change
@@ -25,6 +26,8 @@ signals:
     void escaped();                    ///< Esc without a change
 
 protected:
+    /// Undo and redo are the window's while nothing is being typed here.
+    bool event(QEvent *event) override;
     void keyPressEvent(QKeyEvent *event) override;
     void focusOutEvent(QFocusEvent *event) override;
 

@@ -4,6 +4,7 @@
 #include "ui/session/design_reading.h"
 #include "ui/session/sentences.h"
 #include "ui/strip/end_field.h"
+#include "ui/strip/segment_form.h"
 
 #include <QKeyEvent>
 #include <QPainter>
@@ -55,6 +56,7 @@ FormField boundField(const char *key, const QString &caption, const Json &limit,
     field.pointer = std::string("/") + key;
     field.value = typedAt(limit, field.pointer);
     field.placeholder = EnvelopeDrawer::tr("none");
+    field.optional = true;
     return field;
 }
 
@@ -233,8 +235,14 @@ void EnvelopeDrawer::choose(int limit, const QString &key)
 
 void EnvelopeDrawer::enter(int limit, const QString &id, const QString &text, bool previewOnly)
 {
-    const document::Design changed =
-        withText(m_session.base().design, pointerOf(limit, "/" + id.toStdString()), text);
+    const std::string pointer = pointerOf(limit, "/" + id.toStdString());
+    const bool number = form(limit)->field(id)->content == FieldContent::number && !text.trimmed().isEmpty();
+    const document::Design &base = m_session.base().design;
+    const document::Design changed = number ? withValue(base, pointer, numberAsTyped(text)) : withText(base, pointer, text);
+    if (const auto fault = m_session.faultIn(changed)) {
+        if (!previewOnly) form(limit)->refuse(id, sentenceOf(*fault, m_session.now().units));
+        return;
+    }
     if (previewOnly) m_session.preview(changed);
     else m_session.apply(changed, tr("Change a limit"));
 }

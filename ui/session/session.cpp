@@ -87,6 +87,12 @@ void Session::cancelPreview()
     emit snapshotChanged();
 }
 
+std::optional<Failure> Session::faultIn(const document::Design &design) const
+{
+    const Outcome<analysis::Evaluation> outcome = document::evaluate(design, m_library);
+    return outcome ? outcome->path.startFailure : std::optional(outcome.failure());
+}
+
 void Session::undo()
 {
     cancelPreview();

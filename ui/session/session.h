@@ -60,6 +60,8 @@ public:
     [[nodiscard]] bool isPreviewing() const { return m_beforePreview != nullptr; }
     /// The design an edit starts from: the one before the preview, or now.
     [[nodiscard]] const Snapshot &base() const { return m_beforePreview ? *m_beforePreview : *m_snapshot; }
+    /// Why `design` as a whole, or its start, cannot be computed; none if it can.
+    [[nodiscard]] std::optional<Failure> faultIn(const document::Design &design) const;
     void undo(); ///< ends a preview first
     void redo();
 

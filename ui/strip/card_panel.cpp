@@ -138,6 +138,7 @@ void CardPanel::setLook(const Palette &look)
 void CardPanel::turnTo(int segment)
 {
     m_form->finishTyping(); // what was typed belongs to the card left behind
+    m_form->forgetTyping();
     m_segment = segment;
     refresh();
 }
@@ -205,16 +206,24 @@ document::Design CardPanel::edited(const QString &id, const QString &text) const
 
 void CardPanel::type(const QString &id, const QString &text)
 {
-    m_session.preview(edited(id, text));
+    const document::Design design = edited(id, text);
+    if (isStart() && m_session.faultIn(design)) return; // without a start nothing of the path would be left to see
+    m_session.preview(design);
 }
 
 void CardPanel::enter(const QString &id, const QString &text)
 {
     const FormField *field = m_form->field(id);
+    const document::Design design = edited(id, text);
+    if (isStart())
+        if (const auto fault = m_session.faultIn(design)) {
+            m_form->refuse(id, sentenceOf(*fault, m_session.now().units));
+            return;
+        }
     const QString what = field->choices.empty()
                              ? field->caption
                              : tr("%1 of %2").arg(QString::fromStdString(field->chosen), field->caption);
-    m_session.apply(edited(id, text), tr("Change %1").arg(what));
+    m_session.apply(design, tr("Change %1").arg(what));
 }
 
 void CardPanel::choose(const QString &id, const QString &key)
