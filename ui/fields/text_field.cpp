@@ -33,7 +33,10 @@ void TextField::keyPressEvent(QKeyEvent *event)
 {
     switch (event->key()) {
     case Qt::Key_Return:
-    case Qt::Key_Enter: enter(); return;
+    case Qt::Key_Enter:
+        enter();
+        emit confirmed();
+        return;
     case Qt::Key_Escape:
         if (isModified()) {
             setText(m_shown);

@@ -22,6 +22,7 @@ public:
 
 signals:
     void entered(const QString &text); ///< Enter, or focus left, after a change
+    void confirmed();                  ///< Enter, changed or not
     void restored();                   ///< Esc, after a change
     void escaped();                    ///< Esc without a change
 
