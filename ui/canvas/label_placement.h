@@ -1,0 +1,42 @@
+#pragma once
+// Where labels stand: beside their thing, away from curves, handles and each other.
+
+#include <QLineF>
+#include <QPolygonF>
+#include <QRectF>
+#include <QSizeF>
+
+#include <optional>
+#include <vector>
+
+namespace quasistat::ui
+{
+
+/// A label that looks for its place.
+struct LabelRequest {
+    QSizeF size;           ///< [px]
+    QPointF anchor;        ///< the thing it belongs to
+    double clearance = 0;  ///< [px] kept free around the anchor
+    QPolygonF region = {}; ///< where it should stand, without a leader; empty: near the anchor
+    bool optional = false; ///< left out rather than put over another label
+};
+
+/// What is on the plane already.
+struct Occupied {
+    QRectF bounds;                ///< labels stay inside
+    std::vector<QPolygonF> lines; ///< to be kept free where possible
+    std::vector<QRectF> blocks;   ///< handles, fixed labels: never covered if there is any other place
+};
+
+struct LabelPlace {
+    QRectF plate;
+    std::optional<QLineF> leader; ///< from the plate to the thing, where it cannot stand beside it
+};
+
+/// One place for each request, chosen in their order, greedily: of the candidates around the anchor the one with the
+/// least sum of what it covers, its distance and what its leader crosses. Nothing for an optional label without a free
+/// place. Deterministic. About 150 candidates a label, each in constant time in the number of line points.
+[[nodiscard]] std::vector<std::optional<LabelPlace>> labelPlaces(const std::vector<LabelRequest> &requests,
+                                                                 const Occupied &occupied);
+
+} // namespace quasistat::ui

@@ -1,0 +1,272 @@
+#include "ui/canvas/labels.h"
+
+#include "core/units/display.h"
+#include "ui/canvas/label_box.h"
+#include "ui/canvas/pixel_geometry.h"
+#include "ui/look/figure_text.h"
+#include "ui/look/type.h"
+
+#include <QCoreApplication>
+#include <QTransform>
+
+#include <algorithm>
+#include <cmath>
+
+namespace quasistat::ui
+{
+namespace
+{
+
+constexpr double handleClearance = 12.0;
+constexpr qsizetype mostNamedSegments = 24; // more names than this hide the path
+
+QString tr(const char *text, const char *note = nullptr)
+{
+    return QCoreApplication::translate("Diagram", text, note);
+}
+
+QString utf8(const std::string &text)
+{
+    return QString::fromStdString(text);
+}
+
+QString withUnit(double value, const units::Scale &scale)
+{
+    return utf8(units::digits(value, scale)) + QChar(0x202F) + utf8(scale.unit);
+}
+
+// Labels with the requests for their places, in the order in which they choose.
+struct Waiting {
+    QList<LabelScene> labels;
+    std::vector<LabelRequest> requests;
+    void add(const LabelScene &label, LabelRequest request)
+    {
+        request.size = labelSize(label);
+        labels.append(label);
+        requests.push_back(std::move(request));
+    }
+};
+
+class LabelMaker
+{
+public:
+    LabelMaker(const Scene &scene, const Snapshot &snapshot, const DiagramStyle &style)
+        : m_scene(scene), m_snapshot(snapshot), m_path(snapshot.evaluation->path), m_style(style),
+          m_plain(face(style.labelPixels)), m_medium(face(style.labelPixels, QFont::Medium)),
+          m_strong(face(style.labelPixels, QFont::DemiBold))
+    {
+        std::vector<double> energies;
+        for (const auto &segment : m_path.segments) {
+            energies.push_back(segment.work);
+            energies.push_back(segment.heat);
+        }
+        m_energy = units::scaleFor(units::Quantity::energy, energies, snapshot.units);
+    }
+
+    [[nodiscard]] Waiting all(const QList<LooseLabel> &beside) const
+    {
+        Waiting waiting;
+        addStates(waiting);
+        addNet(waiting);
+        for (const auto &label : beside) addBoundary(waiting, label);
+        addFailure(waiting);
+        if (m_style.isPrint()) addSegments(waiting);
+        addLimits(waiting);
+        return waiting;
+    }
+
+private:
+    [[nodiscard]] LabelScene label() const
+    {
+        LabelScene result;
+        result.colour = m_style.palette.ink;
+        return result;
+    }
+
+    void addStates(Waiting &waiting) const
+    {
+        std::vector<double> pressures;
+        std::vector<double> temperatures;
+        for (const auto &state : m_path.states) {
+            pressures.push_back(state.state.pressure());
+            if (const auto temperature = state.state.temperature()) temperatures.push_back(*temperature);
+        }
+        const auto pressure = units::scaleFor(units::Quantity::pressure, pressures, m_snapshot.units);
+        const auto temperature = units::scaleFor(units::Quantity::temperature, temperatures, m_snapshot.units);
+        for (const auto &handle : m_scene.handles) {
+            if (!m_scene.plane.rect.adjusted(-1, -1, 1, 1).contains(handle.centre)) continue;
+            const gas::State &state = m_path.states[static_cast<std::size_t>(handle.states.first() - 1)].state;
+            LabelScene text = label();
+            text.numbers = handle.states;
+            if (m_style.purpose != Purpose::report) {
+                text.lines.append({RichText::plain(withUnit(state.pressure(), pressure)), {}, m_medium});
+                if (const auto degrees = state.temperature())
+                    text.lines.append({RichText::plain(withUnit(*degrees, temperature)), {}, m_plain, 0.8});
+            }
+            waiting.add(text, {.size = {}, .anchor = handle.centre, .clearance = handleClearance});
+        }
+    }
+
+    void addNet(Waiting &waiting) const
+    {
+        const path::Totals &totals = m_path.totals;
+        if (!totals.closed || totals.netWorkOut == 0.0 || m_path.segments.empty()) return;
+        const bool in = totals.netWorkOut < 0.0;
+        LabelScene text = label();
+        text.plateOpacity = 0.92;
+        text.lines.append({RichText::plain(in ? tr("net work in") : tr("net work out")),
+                           withUnit(std::abs(totals.netWorkOut), m_energy), m_strong});
+        double shortfall = 0.0;
+        for (const auto &segment : m_path.segments)
+            if (segment.drawing.hatchShortfall) shortfall += segment.shortfall.value_or(0.0);
+        if (shortfall > 0.0)
+            text.lines.append({RichText::plain(in ? tr("of it shortfall") : tr("shortfall")),
+                               withUnit(shortfall, m_energy), m_plain, 0.85});
+        const QPolygonF region = m_scene.netArea.isEmpty() ? QPolygonF(m_scene.plane.rect) : m_scene.netArea;
+        waiting.add(text, {.size = {}, .anchor = region.boundingRect().center(), .region = region});
+    }
+
+    void addBoundary(Waiting &waiting, const LooseLabel &loose) const
+    {
+        LabelScene text = label();
+        text.colour = m_style.palette.envelope.colour;
+        text.lines.append({loose.text, {}, m_strong});
+        waiting.add(text, {.size = {}, .anchor = loose.anchor, .clearance = 6.0});
+    }
+
+    // What stops the path, beside the last state reached.
+    void addFailure(Waiting &waiting) const
+    {
+        const auto failed = std::find_if(m_path.failures.begin(), m_path.failures.end(),
+                                         [](const auto &failure) { return failure.has_value(); });
+        if (failed == m_path.failures.end() || m_scene.handles.isEmpty()) return;
+        const auto reached = m_path.states.back().state;
+        LabelScene text = label();
+        text.colour = m_style.palette.error;
+        const int number = static_cast<int>(failed - m_path.failures.begin()) + 1;
+        text.lines.append(
+            {RichText::plain(tr("segment %1 is not reached", "a segment that failed").arg(number)), {}, m_strong});
+        for (const auto &line : wrapped(utf8(units::sentence((*failed)->message, m_snapshot.units)), m_plain, 240.0))
+            text.lines.append({RichText::plain(line), {}, m_plain});
+        waiting.add(text, {.size = {},
+                           .anchor = m_scene.plane.pixel(reached.volume(), reached.pressure()),
+                           .clearance = handleClearance});
+    }
+
+    void addSegments(Waiting &waiting) const
+    {
+        if (m_scene.segments.size() > mostNamedSegments) return;
+        for (const auto &drawn : m_scene.segments) {
+            if (drawn.line.isEmpty()) continue;
+            const auto &segment = m_path.segments[static_cast<std::size_t>(drawn.index)];
+            LabelScene text = label();
+            text.plateOpacity = 0.92;
+            text.dotted = true;
+            text.lines.append({segmentName(drawn.index, segment), {}, m_strong});
+            text.lines.append(
+                {RichText::marked(QStringLiteral("<i>W</i> ")) +
+                     RichText::plain(withUnit(shownEnergy(segment.work), m_energy) + QStringLiteral("\u2003")) +
+                     RichText::marked(QStringLiteral("<i>Q</i> ")) +
+                     RichText::plain(withUnit(shownEnergy(segment.heat), m_energy)),
+                 {},
+                 m_plain,
+                 0.9});
+            waiting.add(text, {.size = {}, .anchor = namingPoint(drawn), .clearance = 5.0, .optional = true});
+        }
+    }
+
+    [[nodiscard]] double shownEnergy(double energy) const { return m_snapshot.units.workByGas ? -energy : energy; }
+
+    [[nodiscard]] static RichText segmentName(int index, const path::SegmentResult &segment)
+    {
+        const auto words = path::facts(segment.kind).words;
+        const QString kind = QCoreApplication::translate("Kind", std::string(words).c_str());
+        QString name = QString::number(index + 1) + QLatin1Char(' ');
+        if (!segment.label.empty()) name += utf8(segment.label) + QStringLiteral(", ");
+        RichText text = RichText::plain(name + kind);
+        if (segment.kind == path::Kind::polytropic && segment.exponent)
+            text += RichText::marked(QStringLiteral(" <i>n</i> ")) +
+                    RichText::plain(QString::number(*segment.exponent, 'f', 3));
+        return text;
+    }
+
+    // A third along, so that the name stays off the arrow and the ends.
+    [[nodiscard]] static QPointF namingPoint(const SegmentScene &segment)
+    {
+        const QPolygonF &line = segment.line.first();
+        return pointAlong(line, 0.36 * lengthOf(line)).point;
+    }
+
+    void addLimits(Waiting &waiting) const
+    {
+        const auto ghosts = std::count_if(m_scene.segments.begin(), m_scene.segments.end(),
+                                          [](const auto &segment) { return !segment.limit.isEmpty(); });
+        for (const auto &drawn : m_scene.segments) {
+            if (drawn.limit.isEmpty() || lengthOf(drawn.limit.first()) < 60.0) continue;
+            LabelScene text = label();
+            text.plateOpacity = 0.92;
+            const QString words = ghosts > 1 || m_style.isPrint() ? tr("reversible limit of %1").arg(drawn.index + 1)
+                                                                  : tr("reversible limit");
+            text.lines.append({RichText::plain(words), {}, m_plain, 0.85});
+            const QPolygonF &line = drawn.limit.first();
+            waiting.add(text, {.size = {},
+                               .anchor = pointAlong(line, 0.42 * lengthOf(line)).point,
+                               .clearance = 5.0,
+                               .optional = ghosts > 1});
+        }
+    }
+
+    const Scene &m_scene;
+    const Snapshot &m_snapshot;
+    const path::PathResult &m_path;
+    const DiagramStyle &m_style;
+    QFont m_plain;
+    QFont m_medium;
+    QFont m_strong;
+    units::Scale m_energy;
+};
+
+Occupied occupied(const Scene &scene)
+{
+    Occupied result;
+    result.bounds = scene.plane.rect.adjusted(4, 4, -2, -4);
+    result.lines = linesOf(scene);
+    for (const auto &segment : scene.segments)
+        for (const auto &piece : segment.limit) result.lines.push_back(piece);
+    for (const auto &handle : scene.handles)
+        result.blocks.push_back(QRectF(handle.centre - QPointF(7, 7), QSizeF(14, 14)));
+    for (const auto &label : scene.boundary.labels)
+        result.blocks.push_back(
+            QTransform().translate(label.centre.x(), label.centre.y()).rotate(label.angle).mapRect(label.plate));
+    for (const auto &segment : scene.segments)
+        if (!segment.head.isEmpty()) result.blocks.push_back(segment.head.boundingRect());
+    return result;
+}
+
+} // namespace
+
+std::vector<QPolygonF> linesOf(const Scene &scene)
+{
+    std::vector<QPolygonF> lines;
+    for (const auto &segment : scene.segments) {
+        lines.insert(lines.end(), segment.line.begin(), segment.line.end());
+        for (const auto &drop : segment.drops) lines.push_back(QPolygonF{drop.p1(), drop.p2()});
+    }
+    lines.insert(lines.end(), scene.boundary.lines.begin(), scene.boundary.lines.end());
+    return lines;
+}
+
+void addLabels(Scene &scene, const Snapshot &snapshot, const DiagramStyle &style, const QList<LooseLabel> &beside)
+{
+    Waiting waiting = LabelMaker(scene, snapshot, style).all(beside);
+    const auto places = labelPlaces(waiting.requests, occupied(scene));
+    for (std::size_t i = 0; i < places.size(); ++i) {
+        if (!places[i]) continue;
+        LabelScene &label = waiting.labels[static_cast<qsizetype>(i)];
+        label.plate = places[i]->plate;
+        label.leader = places[i]->leader;
+        scene.labels.append(label);
+    }
+}
+
+} // namespace quasistat::ui
