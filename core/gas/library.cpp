@@ -121,37 +121,39 @@ const std::vector<ComponentFacts> &Library::idealComponents() const
     return m_data->facts;
 }
 
+Failure Library::unknown(std::string_view name) const
+{
+    std::vector<std::string> near;
+    for (const ComponentFacts &facts : m_data->facts)
+        if (!name.empty() && facts.name.starts_with(lowerCase(name.substr(0, 2)))) near.push_back(facts.name);
+    if (near.empty())
+        return {Reason::unknownName,
+                "",
+                {"there is no gas named “{0}” here; `quasistat gases` lists them all", {std::string(name)}}};
+    return {Reason::unknownName,
+            "",
+            {"there is no gas named “{0}” here; near it are: {1}", {std::string(name), joined(near)}}};
+}
+
 Outcome<std::string> Library::componentName(std::string_view nameOrFormula) const
 {
     if (const Species *species = m_data->find(lowerCase(nameOrFormula))) return species->facts.name;
     std::vector<std::string> sameFormula;
-    std::vector<std::string> near;
-    for (const ComponentFacts &facts : m_data->facts) {
+    for (const ComponentFacts &facts : m_data->facts)
         if (facts.formula == nameOrFormula) sameFormula.push_back(facts.name);
-        if (!nameOrFormula.empty() && facts.name.starts_with(lowerCase(nameOrFormula.substr(0, 2))))
-            near.push_back(facts.name);
-    }
     if (sameFormula.size() == 1) return sameFormula.front();
     if (sameFormula.size() > 1)
         return Failure{Reason::ambiguous,
                        "",
                        {"the formula {0} stands for more than one gas: write {1}",
                         {std::string(nameOrFormula), joined(sameFormula)}}};
-    if (near.empty())
-        return Failure{
-            Reason::unknownName,
-            "",
-            {"there is no gas named “{0}” here; `quasistat gases` lists them all", {std::string(nameOrFormula)}}};
-    return Failure{Reason::unknownName,
-                   "",
-                   {"there is no gas named “{0}” here; near it are: {1}", {std::string(nameOrFormula), joined(near)}}};
+    return unknown(nameOrFormula);
 }
 
 Outcome<double> Library::molarMass(std::string_view component) const
 {
-    const Outcome<std::string> name = componentName(component);
-    if (!name) return name.failure();
-    return m_data->find(*name)->facts.molarMass;
+    if (const Species *species = m_data->find(component)) return species->facts.molarMass;
+    return unknown(component);
 }
 
 Outcome<GasPtr> Library::idealGas(const Composition &composition, std::string name) const
@@ -166,10 +168,7 @@ Outcome<GasPtr> Library::idealGas(const Composition &composition, std::string na
                             .source = m_data->source};
     for (const Share &share : composition) {
         const Species *species = m_data->find(share.component);
-        if (!species) {
-            const Outcome<std::string> unknown = componentName(share.component);
-            return unknown ? Failure{Reason::unknownName, "", {"write “{0}”", {*unknown}}} : unknown.failure();
-        }
+        if (!species) return unknown(share.component);
         parts.push_back(&species->heatCapacity);
         weights.push_back(share.moleFraction);
         facts.molarMass += share.moleFraction * species->facts.molarMass;

@@ -39,12 +39,15 @@ public:
     [[nodiscard]] const std::vector<ComponentFacts> &idealComponents() const;
     /// "N2", "nitrogen" → "nitrogen". Fails with Reason::unknownName naming what is near.
     [[nodiscard]] Outcome<std::string> componentName(std::string_view nameOrFormula) const;
-    /// Molar mass [kg/mol] of a component by its canonical name.
+    /// Molar mass [kg/mol] of a component by its canonical name. Fails as above.
     [[nodiscard]] Outcome<double> molarMass(std::string_view component) const;
     /// Ideal-gas mixture; fractions > 0 that sum to 1 within rounding. `name` as shown ("air"), may be empty.
     [[nodiscard]] Outcome<GasPtr> idealGas(const Composition &composition, std::string name) const;
 
 private:
+    /// “there is no gas named …”, with the names near it.
+    [[nodiscard]] Failure unknown(std::string_view name) const;
+
     struct Data;
     std::unique_ptr<const Data> m_data;
 };

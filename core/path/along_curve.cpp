@@ -17,9 +17,10 @@ constexpr int stretchesOfIdealGas = 4;
 constexpr int stretchesOfRealGas = 32;
 
 constexpr double quadratureTolerance = 1e-12;
-constexpr unsigned quadratureDepth = 14;
-/// Worse than this relative to ∫|f| is reported, never passed on: the audit works at 1e-9.
-constexpr double quadratureRefusal = 1e-10;
+/// Below this share of RT per coordinate an integrand is the rounding of zero (heat at n = γ): halving it again finds
+/// nothing.
+constexpr double roundingOfZero = 1e-14;
+constexpr int mostHalvings = 14;
 
 double rootBetween(const QuasiStaticCurve &curve, const Figures &figure, double a, double b, double fa, double fb)
 {
@@ -64,43 +65,86 @@ Outcome<std::vector<double>> signChanges(const QuasiStaticCurve &curve, double a
     return roots;
 }
 
+namespace
+{
+
+/// Adaptive quadrature of one smooth stretch: halved until the estimate of its error is within tolerance.
+class Quadrature
+{
+public:
+    Quadrature(const QuasiStaticCurve &curve, const Figures &integrand)
+        : m_curve(curve), m_integrand(integrand), m_neighbour(curve.start()),
+          m_floor(roundingOfZero * curve.gas().gasConstant() * curve.start().temperature)
+    {
+    }
+
+    void add(double from, double to) { add(from, to, 0); }
+
+    [[nodiscard]] Outcome<double> sum() const
+    {
+        if (m_left) return *m_left;
+        if (!m_converged || !std::isfinite(m_sum))
+            return Failure{Reason::notConverged, "", {"an integral along this segment did not converge", {}}};
+        return m_sum;
+    }
+
+private:
+    double value(double x)
+    {
+        const auto point = m_curve.at(x, &m_neighbour);
+        if (!point) {
+            if (!m_left) m_left = point.failure();
+            return 0.0;
+        }
+        m_neighbour = point->state;
+        return m_integrand(*point);
+    }
+
+    void add(double from, double to, int halvings)
+    {
+        if (from == to || m_left) return;
+        double error = 0.0;
+        double magnitude = 0.0;
+        const double part = boost::math::quadrature::gauss_kronrod<double, 21>::integrate(
+            [this](double x) { return value(x); }, from, to, 0, 0.0, &error, &magnitude);
+        const double tolerance = std::max(quadratureTolerance * std::abs(magnitude), m_floor * std::abs(to - from));
+        if (error <= tolerance || m_left) {
+            m_sum += part;
+            return;
+        }
+        if (halvings == mostHalvings) {
+            m_converged = false;
+            return;
+        }
+        const double middle = 0.5 * (from + to);
+        add(from, middle, halvings + 1);
+        add(middle, to, halvings + 1);
+    }
+
+    const QuasiStaticCurve &m_curve;
+    const Figures &m_integrand;
+    gas::MolarState m_neighbour;
+    double m_floor;
+    double m_sum = 0.0;
+    bool m_converged = true;
+    std::optional<Failure> m_left; ///< the curve left the model
+};
+
+} // namespace
+
 Outcome<double> integral(const QuasiStaticCurve &curve, double a, double b, const std::vector<double> &breaks,
                          const Figures &integrand)
 {
-    std::optional<Failure> left;
-    gas::MolarState neighbour = curve.start();
-    const auto value = [&](double x) {
-        const auto point = curve.at(x, &neighbour);
-        if (!point) {
-            if (!left) left = point.failure();
-            return 0.0;
-        }
-        neighbour = point->state;
-        return integrand(*point);
-    };
-    double sum = 0.0;
-    double error = 0.0;
-    double magnitude = 0.0;
-    const auto addSmooth = [&](double from, double to) {
-        if (from == to) return;
-        double estimate = 0.0;
-        double absolute = 0.0;
-        sum += boost::math::quadrature::gauss_kronrod<double, 21>::integrate(value, from, to, quadratureDepth,
-                                                                             quadratureTolerance, &estimate, &absolute);
-        error += estimate;
-        magnitude += std::abs(absolute);
-    };
+    Quadrature quadrature(curve, integrand);
     double from = a;
     for (const double at : breaks) {
-        if ((at - from) * (b - from) <= 0.0 || (at - b) * (b - a) >= 0.0) continue; // not strictly between
-        addSmooth(from, at);
+        const bool strictlyBetween = (at - from) * (b - a) > 0.0 && (b - at) * (b - a) > 0.0;
+        if (!strictlyBetween) continue;
+        quadrature.add(from, at);
         from = at;
     }
-    addSmooth(from, b);
-    if (left) return *left;
-    if (!std::isfinite(sum) || error > quadratureRefusal * magnitude)
-        return Failure{Reason::notConverged, "", {"an integral along this segment did not converge", {}}};
-    return sum;
+    quadrature.add(from, b);
+    return quadrature.sum();
 }
 
 Outcome<std::vector<double>> seamCrossings(const QuasiStaticCurve &curve, const std::vector<double> &turningPoints)

@@ -12,6 +12,9 @@ namespace quasistat::path
 namespace
 {
 
+/// Heat below this share of p V is the rounding of none, and enters or leaves at no temperature.
+constexpr double noHeat = 1e-12;
+
 double temperatureSlope(const CurveState &c)
 {
     return c.dTdx;
@@ -119,11 +122,10 @@ private:
             const auto part = integral(*m_curve, cuts[i], cuts[i + 1], m_breaks, heatPerCoordinate);
             if (!part) return part.failure();
             const double heat = m_from.amount() * *part;
-            if (heat == 0.0) continue;
-            const Interval temperatures = temperaturesBetween(cuts[i], cuts[i + 1]);
-            auto &side = heat > 0.0 ? exchange.temperatureIn : exchange.temperatureOut;
-            side = joined(side, temperatures);
             (heat > 0.0 ? exchange.in : exchange.out) += std::abs(heat);
+            if (std::abs(heat) <= noHeat * m_from.pressure() * m_from.volume()) continue;
+            auto &side = heat > 0.0 ? exchange.temperatureIn : exchange.temperatureOut;
+            side = joined(side, temperaturesBetween(cuts[i], cuts[i + 1]));
         }
         return exchange;
     }

@@ -91,7 +91,9 @@ private:
                     lowest = std::min(lowest, of(sample->point));
                     highest = std::max(highest, of(sample->point));
                 }
-                return highest > lowest ? highest - lowest : 1.0;
+                // What the law keeps constant varies by rounding only, and rounding is not to be drawn.
+                const double constant = std::max({std::abs(lowest), std::abs(highest), m_curve.amount()});
+                return highest - lowest > 1e-9 * constant ? highest - lowest : constant;
             };
             plane.width = extent(plane.abscissa);
             plane.height = extent(plane.ordinate);

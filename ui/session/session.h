@@ -26,6 +26,9 @@ struct Snapshot {
 };
 using SnapshotPtr = std::shared_ptr<const Snapshot>;
 
+/// `selected` of a session when the start state, not a segment, is chosen.
+inline constexpr int startSelected = -2;
+
 class Session : public QObject
 {
     Q_OBJECT
@@ -37,9 +40,12 @@ public:
     [[nodiscard]] const gas::Library &library() const { return m_library; }
     [[nodiscard]] QUndoStack &undoStack() { return m_undo; }
     [[nodiscard]] bool hasDesign() const { return m_hasDesign; } ///< false: the welcome state
+    [[nodiscard]] bool isModified() const { return m_hasDesign && !m_undo.isClean(); }
 
     /// Replaces everything: a file opened or a new design. Clears the undo stack; `path` empty for an unsaved one.
     void open(document::Design design, const QString &path);
+    /// As open, but the design counts as changed since it was saved: work that was recovered.
+    void openUnsaved(document::Design design, const QString &path);
     void close(); ///< back to the welcome state
     [[nodiscard]] const QString &filePath() const { return m_path; }
     void markSaved(const QString &path);
@@ -52,8 +58,14 @@ public:
     void preview(const document::Design &design);
     void cancelPreview();
     [[nodiscard]] bool isPreviewing() const { return m_beforePreview != nullptr; }
+    /// The design an edit starts from: the one before the preview, or now.
+    [[nodiscard]] const Snapshot &base() const { return m_beforePreview ? *m_beforePreview : *m_snapshot; }
+    /// Why `design` as a whole, or its start, cannot be computed; none if it can.
+    [[nodiscard]] std::optional<Failure> faultIn(const document::Design &design) const;
+    void undo(); ///< ends a preview first
+    void redo();
 
-    /// Segment index from 0; −1: none.
+    /// Segment index from 0; −1: none; startSelected: the start state.
     [[nodiscard]] int selected() const { return m_selected; }
     [[nodiscard]] int hovered() const { return m_hovered; }
     void select(int segment);
@@ -69,6 +81,9 @@ signals:
 private:
     friend class DesignCommand;
     void show(document::Design design);
+    [[nodiscard]] SnapshotPtr snapshotOf(document::Design design) const;
+    void replace(document::Design design, const QString &path, bool hasDesign);
+    void clampSelection();
 
     gas::Library m_library;
     QUndoStack m_undo;

@@ -1,0 +1,296 @@
+#include "ui/window/header_forms.h"
+
+#include "ui/session/design_reading.h"
+#include "ui/session/sentences.h"
+#include "ui/strip/segment_form.h"
+
+#include <QCoreApplication>
+#include <QRegularExpression>
+
+namespace quasistat::ui
+{
+
+using document::Design;
+using document::Json;
+using units::Quantity;
+
+namespace
+{
+
+QString say(const char *text)
+{
+    return QCoreApplication::translate("Header", text);
+}
+
+const QString dot = QStringLiteral(" · ");
+
+FormField valueField(const char *id, const char *caption, FieldContent content, const char *pointer,
+                     const Design &design, Quantity quantity = Quantity::number)
+{
+    FormField field{.id = id, .caption = say(caption)};
+    field.content = content;
+    field.pointer = pointer;
+    field.quantity = quantity;
+    field.value = typedAt(design.json, pointer);
+    return field;
+}
+
+// --- title block
+
+QString numberAndRevision(const Design &design)
+{
+    const QString number = typedAt(design.json, "/document/number");
+    const QString revision = typedAt(design.json, "/document/revision");
+    if (number.isEmpty()) return revision.isEmpty() ? say("number · revision") : say("revision %1").arg(revision);
+    return revision.isEmpty() ? number : number + dot + say("revision %1").arg(revision);
+}
+
+std::vector<FormField> titleForm(const Design &design)
+{
+    std::vector<FormField> form;
+    const auto add = [&](const char *id, const char *caption, const char *pointer) {
+        form.push_back(valueField(id, caption, FieldContent::text, pointer, design));
+    };
+    add("title", QT_TRANSLATE_NOOP("Header", "title"), "/title");
+    add("number", QT_TRANSLATE_NOOP("Header", "number"), "/document/number");
+    add("revision", QT_TRANSLATE_NOOP("Header", "revision"), "/document/revision");
+    add("date", QT_TRANSLATE_NOOP("Header", "date"), "/document/date");
+    add("organisation", QT_TRANSLATE_NOOP("Header", "for"), "/document/organisation");
+    add("prepared_by", QT_TRANSLATE_NOOP("Header", "prepared"), "/document/prepared_by");
+    add("checked_by", QT_TRANSLATE_NOOP("Header", "checked"), "/document/checked_by");
+    add("approved_by", QT_TRANSLATE_NOOP("Header", "approved"), "/document/approved_by");
+    add("notes", QT_TRANSLATE_NOOP("Header", "notes"), "/notes");
+    return form;
+}
+
+// --- gas
+
+std::string compositionKey(const Design &design)
+{
+    return valueAt(design.json, "/gas/composition_by_mass") ? "composition_by_mass" : "composition";
+}
+
+QString modelWords(const Design &design)
+{
+    const QString model = typedAt(design.json, "/gas/model");
+    return model == QLatin1String("perfect") ? say("perfect") : model == QLatin1String("ideal") ? say("ideal") : model;
+}
+
+RichText gasWords(const Snapshot &snapshot)
+{
+    const Design &design = snapshot.design;
+    QString name = typedAt(design.json, "/gas/name");
+    if (name.isEmpty()) {
+        const Json *composition = valueAt(design.json, "/gas/" + compositionKey(design));
+        if (composition) name = compositionText(*composition);
+    }
+    const QString ratio = typedAt(design.json, "/gas/heat_capacity_ratio");
+    RichText words = RichText::plain(name.isEmpty() ? modelWords(design) : name + dot + modelWords(design));
+    if (!ratio.isEmpty()) words += RichText::marked(QStringLiteral(", <i>γ</i> ")) + RichText::plain(printed(ratio));
+    return words;
+}
+
+std::vector<FormField> gasForm(const Design &design)
+{
+    FormField model{.id = "model", .caption = say(QT_TRANSLATE_NOOP("Header", "model"))};
+    model.choices = {{"perfect", say(QT_TRANSLATE_NOOP("Header", "perfect, constant heat capacity"))},
+                     {"ideal", say(QT_TRANSLATE_NOOP("Header", "ideal, published heat capacities"))}};
+    model.chosen = typedAt(design.json, "/gas/model").toStdString();
+    std::vector<FormField> form{model};
+    if (model.chosen == "perfect") {
+        form.push_back(
+            valueField("heat_capacity_ratio", "γ", FieldContent::number, "/gas/heat_capacity_ratio", design));
+        form.push_back(valueField("molar_mass", QT_TRANSLATE_NOOP("Header", "molar mass"), FieldContent::quantity,
+                                  "/gas/molar_mass", design, Quantity::molarMass));
+        form.push_back(
+            valueField("name", QT_TRANSLATE_NOOP("Header", "called"), FieldContent::text, "/gas/name", design));
+        return form;
+    }
+    const std::string key = compositionKey(design);
+    FormField made = valueField("composition",
+                                key == "composition" ? QT_TRANSLATE_NOOP("Header", "made of")
+                                                     : QT_TRANSLATE_NOOP("Header", "by mass"),
+                                FieldContent::text, "", design);
+    made.pointer = "/gas/" + key;
+    if (const Json *composition = valueAt(design.json, made.pointer)) made.value = compositionText(*composition);
+    made.placeholder = say(QT_TRANSLATE_NOOP("Header", "air, or nitrogen 0.78, oxygen 0.22"));
+    form.push_back(made);
+    return form;
+}
+
+Design modelChosen(const Design &design, const std::string &model)
+{
+    Json gas{{"model", model}};
+    if (model == "perfect") {
+        gas["heat_capacity_ratio"] = 1.4;
+        gas["molar_mass"] = "28.96 g/mol";
+        gas["name"] = say(QT_TRANSLATE_NOOP("Header", "Dry air")).toStdString();
+    } else
+        gas["composition"] = Json{{"air", 1}};
+    return withValue(design, "/gas", gas);
+}
+
+// --- surroundings, units, rate
+
+RichText surroundingsWords(const Snapshot &snapshot)
+{
+    const QString pressure = typedAt(snapshot.design.json, "/surroundings/pressure");
+    const QString temperature = typedAt(snapshot.design.json, "/surroundings/temperature");
+    const auto orDefault = [&](const QString &text, double value, Quantity quantity) {
+        return text.isEmpty() ? shownFigure(value, quantity, snapshot.units) : printed(text);
+    };
+    const path::Surroundings standard;
+    return RichText::plain(orDefault(pressure, standard.pressure, Quantity::pressure) + dot +
+                           orDefault(temperature, standard.temperature, Quantity::temperature));
+}
+
+std::vector<FormField> surroundingsForm(const Snapshot &snapshot)
+{
+    std::vector<FormField> form{valueField("pressure", QT_TRANSLATE_NOOP("Header", "pressure"), FieldContent::quantity,
+                                           "/surroundings/pressure", snapshot.design, Quantity::pressure),
+                                valueField("temperature", QT_TRANSLATE_NOOP("Header", "temperature"),
+                                           FieldContent::quantity, "/surroundings/temperature", snapshot.design,
+                                           Quantity::temperature)};
+    form[0].placeholder = QStringLiteral("101.325 kPa");
+    form[1].placeholder = QStringLiteral("25 °C");
+    for (FormField &field : form) field.optional = true;
+    return form;
+}
+
+FormField unitField(const char *id, const char *caption, const std::string &now,
+                    std::initializer_list<const char *> offered)
+{
+    FormField field{.id = id, .caption = say(caption)};
+    bool known = now.empty();
+    for (const char *unit : offered) {
+        const QString words = *unit ? QString::fromUtf8(unit) : say(QT_TRANSLATE_NOOP("Header", "as it reads well"));
+        field.choices.push_back({unit, words});
+        known = known || now == unit;
+    }
+    if (!known) field.choices.push_back({now, QString::fromStdString(now)});
+    field.chosen = now;
+    return field;
+}
+
+std::vector<FormField> unitsForm(const units::DisplayUnits &units)
+{
+    return {unitField("pressure", QT_TRANSLATE_NOOP("Header", "pressure"), units.pressure,
+                      {"bar", "mbar", "kPa", "MPa", "Pa", "atm", "psi"}),
+            unitField("volume", QT_TRANSLATE_NOOP("Header", "volume"), units.volume,
+                      {"L", "mL", "cm3", "m3", "ft3", "in3"}),
+            unitField("temperature", QT_TRANSLATE_NOOP("Header", "temperature"), units.temperature, {"°C", "K", "°F"}),
+            unitField("energy", QT_TRANSLATE_NOOP("Header", "energy"), units.energy,
+                      {"", "J", "kJ", "MJ", "Wh", "kWh", "cal", "kcal"})};
+}
+
+RichText unitsWords(const units::DisplayUnits &units)
+{
+    QStringList names;
+    for (const std::string *unit : {&units.pressure, &units.volume, &units.temperature, &units.energy})
+        if (!unit->empty()) names << QString::fromStdString(*unit);
+    if (units.energy.empty()) names << QStringLiteral("J");
+    return RichText::plain(names.join(dot));
+}
+
+} // namespace
+
+HeaderText headerText(HeaderPart part, const Snapshot &snapshot)
+{
+    switch (part) {
+    case HeaderPart::title: {
+        const QString title = typedAt(snapshot.design.json, "/title");
+        return {numberAndRevision(snapshot.design), RichText::plain(title.isEmpty() ? say("untitled design") : title)};
+    }
+    case HeaderPart::gas: return {say("gas"), gasWords(snapshot)};
+    case HeaderPart::surroundings: return {say("surroundings"), surroundingsWords(snapshot)};
+    case HeaderPart::sign:
+        return {say("work and heat"),
+                RichText::plain(snapshot.units.workByGas ? say("positive by the gas") : say("positive into the gas"))};
+    case HeaderPart::units: return {say("units"), unitsWords(snapshot.units)};
+    case HeaderPart::rate: {
+        const QString rate = typedAt(snapshot.design.json, "/rate");
+        return {say("rate"), RichText::plain(rate.isEmpty() ? say("none") : printed(rate))};
+    }
+    }
+    return {};
+}
+
+std::vector<FormField> headerForm(HeaderPart part, const Snapshot &snapshot)
+{
+    switch (part) {
+    case HeaderPart::title: return titleForm(snapshot.design);
+    case HeaderPart::gas: return gasForm(snapshot.design);
+    case HeaderPart::surroundings: return surroundingsForm(snapshot);
+    case HeaderPart::sign: return {};
+    case HeaderPart::units: return unitsForm(snapshot.units);
+    case HeaderPart::rate: {
+        FormField field = valueField("rate", QT_TRANSLATE_NOOP("Header", "cycles"), FieldContent::quantity, "/rate",
+                                     snapshot.design, Quantity::frequency);
+        field.placeholder = QStringLiteral("60 1/min");
+        field.optional = true;
+        return {field};
+    }
+    }
+    return {};
+}
+
+HeaderEdit headerEntered(HeaderPart part, const Design &design, const FormField &field, const QString &text)
+{
+    if (part == HeaderPart::gas && field.id == "composition") {
+        const auto composition = compositionFrom(text);
+        if (!composition)
+            return {design,
+                    say("Write each gas with its fraction: nitrogen 0.78, oxygen 0.22; or one name alone: air.")};
+        return {withValue(design, field.pointer, *composition), {}};
+    }
+    if (field.content == FieldContent::number) return {withValue(design, field.pointer, numberAsTyped(text)), {}};
+    return {withText(design, field.pointer, text), {}};
+}
+
+Design headerChosen(HeaderPart part, const Snapshot &snapshot, const FormField &field, const std::string &key)
+{
+    if (part == HeaderPart::gas) return modelChosen(snapshot.design, key);
+    return withValue(snapshot.design, "/view/units/" + field.id, key);
+}
+
+Design signTurned(const Snapshot &snapshot)
+{
+    return snapshot.units.workByGas ? withoutValue(snapshot.design, "/view/sign")
+                                    : withValue(snapshot.design, "/view/sign", "by the gas");
+}
+
+QString compositionText(const Json &composition)
+{
+    if (!composition.is_object()) return {};
+    QStringList parts;
+    for (const auto &[name, share] : composition.items()) {
+        const QString component = QString::fromStdString(name);
+        const bool alone = composition.size() == 1 && share == 1;
+        parts << (alone ? component : component + QLatin1Char(' ') + typed(&share));
+    }
+    return parts.join(QStringLiteral(", "));
+}
+
+std::optional<Json> compositionFrom(const QString &text)
+{
+    static const QRegularExpression entry(QStringLiteral("^(.*\\S)\\s+([0-9.eE+-]+)$"));
+    const QStringList parts = text.split(QLatin1Char(','));
+    Json composition = Json::object();
+    for (const QString &part : parts) {
+        const QString trimmed = part.trimmed();
+        const auto match = entry.match(trimmed);
+        if (trimmed.isEmpty() || (!match.hasMatch() && parts.size() > 1)) return {};
+        if (!match.hasMatch()) {
+            composition[trimmed.toStdString()] = 1;
+            continue;
+        }
+        bool isNumber = false;
+        const double share = match.captured(2).toDouble(&isNumber);
+        if (!isNumber) return {};
+        const Json asTyped = numberAsTyped(match.captured(2));
+        composition[match.captured(1).toStdString()] = asTyped.is_number() ? asTyped : Json(share);
+    }
+    return composition;
+}
+
+} // namespace quasistat::ui

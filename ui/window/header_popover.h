@@ -1,0 +1,43 @@
+#pragma once
+// The small editor that opens under a field of the header: not modal, closed by Esc or by a click elsewhere.
+
+#include "ui/fields/form_view.h"
+#include "ui/window/header_forms.h"
+
+namespace quasistat::ui
+{
+
+class HeaderPopover : public QWidget
+{
+    Q_OBJECT
+public:
+    explicit HeaderPopover(Session &session, QWidget *parent);
+
+    void setLook(const Palette &look);
+    /// Opens for `part`, its upper left corner at `at` (the parent's coordinates) as far as the parent leaves room.
+    void openFor(HeaderPart part, const QPoint &at);
+    void finish(); ///< enters what is being typed and closes
+    [[nodiscard]] FormView &form() { return *m_form; }
+    [[nodiscard]] HeaderPart part() const { return m_part; }
+
+protected:
+    void paintEvent(QPaintEvent *event) override;
+    void keyPressEvent(QKeyEvent *event) override;
+    bool eventFilter(QObject *watched, QEvent *event) override;
+    void hideEvent(QHideEvent *event) override;
+    void showEvent(QShowEvent *event) override;
+
+private:
+    void refresh();
+    void fit();
+    void choose(const QString &id, const QString &key);
+    void type(const QString &id, const QString &text);
+    void enter(const QString &id, const QString &text);
+
+    Session &m_session;
+    Palette m_look;
+    FormView *m_form = nullptr;
+    HeaderPart m_part = HeaderPart::title;
+};
+
+} // namespace quasistat::ui
