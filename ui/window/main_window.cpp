@@ -37,7 +37,12 @@ MainWindow::MainWindow(const QString &recoveryFolder, QWidget *parent)
     offerRecovery();
 }
 
-MainWindow::~MainWindow() = default;
+MainWindow::~MainWindow()
+{
+    // The views read the session until their end, so they go before it; and nobody listens to its own going.
+    m_session.disconnect();
+    qDeleteAll(findChildren<QWidget *>(QString(), Qt::FindDirectChildrenOnly));
+}
 
 void MainWindow::createViews()
 {
