@@ -14,13 +14,13 @@ namespace quasistat::ui
 namespace
 {
 
-constexpr int margin = 16;
+constexpr int margin = 12;
 constexpr int gap = 8;
 constexpr int widest = 168;
 constexpr int narrowest = 148;
 constexpr int unfoldedWidth = 264;
-constexpr int startWidth = 96;
-constexpr int nextWidth = 92;
+constexpr int startWidth = 84;
+constexpr int nextWidth = 86;
 
 /// Leaves the arrow keys to the strip: they go from card to card, the row follows.
 class CardScroll : public QScrollArea

@@ -34,6 +34,8 @@ MainWindow::MainWindow(const QString &recoveryFolder, QWidget *parent)
     applyScheme();
     enableActions();
     layOut();
+    setFocusPolicy(Qt::ClickFocus);
+    setFocus();
     offerRecovery();
 }
 
