@@ -80,8 +80,7 @@ const Json &typedBefore(const Json &segment, EndKey key)
 }
 
 // A level against constant external pressure ends at balance; pulled up to there or beyond, it says so.
-bool isAtBalance(States states, const path::Segment &segment, const path::SlidePoint &point,
-                 const Plane &plane)
+bool isAtBalance(States states, const path::Segment &segment, const path::SlidePoint &point, const Plane &plane)
 {
     if (path::kindOf(segment.process) != path::Kind::constantExternalPressure) return false;
     const double start = states.back().state.volume();

@@ -47,7 +47,8 @@ std::string uncertaintyTail(const Json &typed)
     if (!typed.is_string()) return {};
     const auto text = typed.get<std::string>();
     for (const char *mark : {"±", "+/-"})
-        if (const auto at = text.find(mark); at != std::string::npos) return " " + text.substr(at);
+        if (const auto at = text.find(mark); at != std::string::npos)
+            return std::string(1, ' ').append(text, at, std::string::npos);
     return {};
 }
 
