@@ -32,7 +32,7 @@ QPolygonF linePixels(const BoundaryStretch &stretch, const Plane &plane)
 {
     QPolygonF line;
     for (const auto &[volume, pressure] : stretch.points) line.append(plane.pixel(volume, pressure));
-    return line;
+    return thinned(line);
 }
 
 // The forbidden side of one stretch, always turning the same way, so that the union of all is one winding fill.
@@ -186,7 +186,7 @@ BoundaryScene boundaryScene(const Snapshot &snapshot, const Plane &plane, const 
     }
     for (const auto &verdict : evaluation.verdicts)
         for (const auto &violation : verdict.violations)
-            scene.violated += clippedLine(plane.pixels(violation.stretch), plane.rect.adjusted(-8, -8, 8, 8));
+            scene.violated += clippedLine(thinned(plane.pixels(violation.stretch)), plane.rect.adjusted(-8, -8, 8, 8));
     return scene;
 }
 

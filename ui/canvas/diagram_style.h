@@ -43,7 +43,7 @@ struct DiagramStyle {
 {
     return {.palette = printPalette(),
             .purpose = Purpose::report,
-            .margins = {38, 8, 8, 34},
+            .margins = {48, 8, 8, 34},
             .labelPixels = 10.0,
             .curve = 2.0,
             .emphasisedCurve = 2.0};

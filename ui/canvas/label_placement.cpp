@@ -1,7 +1,5 @@
 #include "ui/canvas/label_placement.h"
 
-#include "ui/canvas/pixel_geometry.h"
-
 #include <algorithm>
 #include <array>
 #include <cmath>
@@ -74,16 +72,20 @@ private:
 };
 
 // Distances of the plate from its anchor's clearance [px], nearest first.
-constexpr std::array distances{2.0, 10.0, 22.0, 38.0, 58.0, 82.0, 112.0, 150.0, 200.0, 260.0, 330.0};
-constexpr double besideAtMost = 24.0; // farther away a label needs a leader
-constexpr int directions = 16;
+constexpr std::array distances{0.0, 6.0, 14.0, 24.0, 38.0, 58.0, 82.0, 112.0, 150.0, 200.0, 260.0, 330.0};
+constexpr double besideAtMost = 16.0; // farther away a label needs a leader
+constexpr int directions = 24;
+constexpr double nudge = 14.0; // a candidate that stands out of the bounds by less is moved inside
 
 constexpr double costOfLineCell = 5.0;
 constexpr double costOfBlock = 400.0;
 constexpr double costOfDistance = 0.14;
 constexpr double costOfLeader = 5.0;
+constexpr double costOfCrossedCell = 2.0;
 constexpr double costOfCrossedPlate = 60.0;
-constexpr double unacceptable = 400.0;
+constexpr double costOfCornerOutside = 25.0; // of a label that should stand in a region
+constexpr double dear = 30.0;                // a shorter form is tried then
+constexpr double unacceptable = 90.0;
 
 double overlap(const QRectF &first, const QRectF &second)
 {
@@ -93,19 +95,35 @@ double overlap(const QRectF &first, const QRectF &second)
 
 bool crosses(const QLineF &line, const QRectF &rect)
 {
-    return !clippedLine(QPolygonF{line.p1(), line.p2()}, rect).isEmpty();
+    if (std::max(line.x1(), line.x2()) < rect.left() || std::min(line.x1(), line.x2()) > rect.right() ||
+        std::max(line.y1(), line.y2()) < rect.top() || std::min(line.y1(), line.y2()) > rect.bottom())
+        return false;
+    // The corners lie on both sides of the line.
+    const auto side = [&](double x, double y) { return line.dx() * (y - line.y1()) > line.dy() * (x - line.x1()); };
+    const bool first = side(rect.left(), rect.top());
+    return side(rect.right(), rect.top()) != first || side(rect.left(), rect.bottom()) != first ||
+           side(rect.right(), rect.bottom()) != first;
 }
 
 // From the plate's edge towards the anchor, ending where the anchor's own mark begins.
-QLineF leaderOf(const QRectF &plate, const LabelRequest &request)
+QLineF leaderOf(const QRectF &plate, QPointF anchor, double clearance)
 {
     const double inset = std::min(8.0, plate.width() / 2.0);
-    const QPointF from(std::clamp(request.anchor.x(), plate.left() + inset, plate.right() - inset),
-                       std::clamp(request.anchor.y(), plate.top(), plate.bottom()));
-    QLineF leader(from, request.anchor);
-    const double free = std::min(request.clearance * 0.6, leader.length());
+    const QPointF from(std::clamp(anchor.x(), plate.left() + inset, plate.right() - inset),
+                       std::clamp(anchor.y(), plate.top(), plate.bottom()));
+    QLineF leader(from, anchor);
+    const double free = std::min(clearance * 0.6, leader.length());
     leader.setLength(std::max(0.0, leader.length() - free));
     return leader;
+}
+
+QRectF movedInside(QRectF plate, const QRectF &bounds)
+{
+    if (plate.left() < bounds.left()) plate.moveLeft(bounds.left());
+    if (plate.right() > bounds.right()) plate.moveRight(bounds.right());
+    if (plate.top() < bounds.top()) plate.moveTop(bounds.top());
+    if (plate.bottom() > bounds.bottom()) plate.moveBottom(bounds.bottom());
+    return plate;
 }
 
 class Placement
@@ -120,10 +138,9 @@ public:
     {
         m_best.reset();
         m_bestCost = std::numeric_limits<double>::infinity();
-        if (request.region.isEmpty())
-            tryAround(request);
-        else
-            tryWithin(request);
+        if (!request.region.isEmpty()) tryWithin(request);
+        tryAround(request, request.size, false);
+        if (request.compact && m_bestCost > dear) tryAround(request, *request.compact, true);
         if (!m_best || (request.optional && m_bestCost >= unacceptable)) return std::nullopt;
         m_blocks.push_back(m_best->plate);
         if (m_best->leader) m_leaders.push_back(*m_best->leader);
@@ -131,56 +148,77 @@ public:
     }
 
 private:
-    void tryAround(const LabelRequest &request)
+    struct Candidate {
+        QRectF plate;
+        QPointF anchor;
+        double distance = 0.0;
+        double clearance = 0.0;
+        bool wantsLeader = false;
+        bool isCompact = false;
+    };
+
+    void tryAround(const LabelRequest &request, QSizeF size, bool compact)
     {
         for (const double distance : distances) {
-            if (m_bestCost <= distance * costOfDistance) return; // no farther candidate can be better
-            for (int direction = 0; direction < directions; ++direction) {
-                const double angle = 2.0 * std::numbers::pi * direction / directions;
-                const double reach = request.clearance + distance;
-                const QPointF centre =
-                    request.anchor + QPointF(std::cos(angle) * (request.size.width() / 2.0 + reach),
-                                             -std::sin(angle) * (request.size.height() / 2.0 + reach));
-                // To the right reads best; then, a little dearer, the other sides.
-                consider(request, centre, distance, distance * costOfDistance + 0.6 * (1.0 - std::cos(angle)));
-            }
+            // No farther candidate can be better, or is wanted.
+            if (m_bestCost <= distance * costOfDistance || distance > request.farthest) return;
+            for (const QPointF anchor : request.anchors) ring(request, anchor, size, distance, compact);
+        }
+    }
+
+    void ring(const LabelRequest &request, QPointF anchor, QSizeF size, double distance, bool compact)
+    {
+        const double reach = request.clearance + distance;
+        for (int direction = 0; direction < directions; ++direction) {
+            const double angle = 2.0 * std::numbers::pi * direction / directions;
+            QRectF plate(QPointF(), size);
+            plate.moveCenter(anchor + QPointF(std::cos(angle) * (size.width() / 2.0 + reach),
+                                              -std::sin(angle) * (size.height() / 2.0 + reach)));
+            // To the right reads best; the other sides are a little dearer.
+            const double cost = distance * costOfDistance + 0.6 * (1.0 - std::cos(angle));
+            consider({plate, anchor, distance, request.clearance, distance > besideAtMost, compact}, cost);
         }
     }
 
     void tryWithin(const LabelRequest &request)
     {
         const QRectF extent = request.region.boundingRect();
-        constexpr double step = 12.0;
+        constexpr double step = 10.0;
         for (double y = extent.top(); y <= extent.bottom(); y += step)
             for (double x = extent.left(); x <= extent.right(); x += step) {
-                const QPointF centre(x, y);
-                const double outside = request.region.containsPoint(centre, Qt::OddEvenFill) ? 0.0 : 60.0;
-                const double distance = QLineF(centre, request.anchor).length();
-                consider(request, centre, 0.0, 0.25 * costOfDistance * distance + outside);
+                QRectF plate(QPointF(), request.size);
+                plate.moveCenter({x, y});
+                double cost = 0.02 * QLineF(plate.center(), request.anchors.front()).length();
+                for (const QPointF corner :
+                     {plate.topLeft(), plate.topRight(), plate.bottomLeft(), plate.bottomRight()})
+                    if (!request.region.containsPoint(corner, Qt::OddEvenFill)) cost += costOfCornerOutside;
+                consider({.plate = plate, .anchor = plate.center()}, cost);
             }
     }
 
-    void consider(const LabelRequest &request, QPointF centre, double distance, double cost)
+    void consider(const Candidate &candidate, double cost)
     {
-        QRectF plate(QPointF(), request.size);
-        plate.moveCenter(centre);
-        if (!m_bounds.contains(plate) || cost >= m_bestCost) return;
-        cost += costOfLineCell * m_density.inside(plate.adjusted(-3, -3, 3, 3));
         if (cost >= m_bestCost) return;
+        const QRectF plate = movedInside(candidate.plate, m_bounds);
+        const double moved = QLineF(plate.center(), candidate.plate.center()).length();
+        if (moved > nudge || !m_bounds.adjusted(-0.5, -0.5, 0.5, 0.5).contains(plate)) return;
+        if (moved > 0.0 && plate.adjusted(-4, -4, 4, 4).contains(candidate.anchor)) return;
         const QRectF wide = plate.adjusted(-3, -3, 3, 3);
+        cost += costOfLineCell * m_density.inside(wide);
+        if (cost >= m_bestCost) return;
         for (const auto &block : m_blocks)
             if (const double area = overlap(wide, block); area > 0.0) cost += costOfBlock + area;
         for (const auto &leader : m_leaders)
             if (crosses(leader, plate)) cost += costOfCrossedPlate;
         if (cost >= m_bestCost) return;
         std::optional<QLineF> leader;
-        if (request.region.isEmpty() && distance > besideAtMost) {
-            leader = leaderOf(plate, request);
+        if (candidate.wantsLeader) {
+            leader = leaderOf(plate, candidate.anchor, candidate.clearance);
             cost += costOfLeader + leaderCost(*leader);
         }
         if (cost >= m_bestCost) return;
         m_bestCost = cost;
-        m_best = LabelPlace{plate, leader};
+        m_best = LabelPlace{plate, leader, candidate.isCompact};
     }
 
     [[nodiscard]] double leaderCost(const QLineF &leader) const
@@ -190,6 +228,11 @@ private:
             if (!block.contains(leader.p2()) && crosses(leader, block)) cost += costOfCrossedPlate;
         for (const auto &other : m_leaders)
             if (leader.intersects(other, nullptr) == QLineF::BoundedIntersection) cost += costOfCrossedPlate;
+        // The last stretch reaches the thing itself and does not count.
+        const int steps = static_cast<int>((leader.length() - 12.0) / 8.0);
+        for (int step = 0; step < steps; ++step)
+            if (m_density.inside(QRectF(leader.pointAt((step + 0.5) * 8.0 / leader.length()), QSizeF(1, 1))) > 0)
+                cost += costOfCrossedCell;
         return cost;
     }
 

@@ -14,11 +14,13 @@ namespace quasistat::ui
 
 /// A label that looks for its place.
 struct LabelRequest {
-    QSizeF size;           ///< [px]
-    QPointF anchor;        ///< the thing it belongs to
-    double clearance = 0;  ///< [px] kept free around the anchor
-    QPolygonF region = {}; ///< where it should stand, without a leader; empty: near the anchor
-    bool optional = false; ///< left out rather than put over another label
+    QSizeF size;                        ///< [px]
+    std::vector<QPointF> anchors;       ///< places of the thing it belongs to, any of them will do; at least one
+    double clearance = 0;               ///< [px] kept free around the anchor
+    QPolygonF region = {};              ///< where it should stand if it fits, without a leader
+    std::optional<QSizeF> compact = {}; ///< a shorter form, taken where the whole one has no good place
+    double farthest = 1000.0;           ///< [px] from the anchor's clearance to the plate
+    bool optional = false;              ///< left out rather than put over another label
 };
 
 /// What is on the plane already.
@@ -31,6 +33,7 @@ struct Occupied {
 struct LabelPlace {
     QRectF plate;
     std::optional<QLineF> leader; ///< from the plate to the thing, where it cannot stand beside it
+    bool isCompact = false;
 };
 
 /// One place for each request, chosen in their order, greedily: of the candidates around the anchor the one with the

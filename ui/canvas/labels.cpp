@@ -35,13 +35,23 @@ QString withUnit(double value, const units::Scale &scale)
     return utf8(units::digits(value, scale)) + QChar(0x202F) + utf8(scale.unit);
 }
 
+LabelScene shortForm(const LabelScene &label)
+{
+    LabelScene result = label;
+    result.lines.resize(std::min<qsizetype>(label.shortLines, label.lines.size()));
+    return result;
+}
+
 // Labels with the requests for their places, in the order in which they choose.
 struct Waiting {
     QList<LabelScene> labels;
     std::vector<LabelRequest> requests;
-    void add(const LabelScene &label, LabelRequest request)
+    /// `shortLines`: how many lines its shorter form keeps; −1: it has none.
+    void add(LabelScene label, LabelRequest request, int shortLines = -1)
     {
         request.size = labelSize(label);
+        label.shortLines = shortLines;
+        if (shortLines >= 0) request.compact = labelSize(shortForm(label));
         labels.append(label);
         requests.push_back(std::move(request));
     }
@@ -103,7 +113,13 @@ private:
                 if (const auto degrees = state.temperature())
                     text.lines.append({RichText::plain(withUnit(*degrees, temperature)), {}, m_plain, 0.8});
             }
-            waiting.add(text, {.size = {}, .anchor = handle.centre, .clearance = handleClearance});
+            waiting.add(text,
+                        {.size = {},
+                         .anchors = {handle.centre},
+                         .clearance = handleClearance,
+                         .farthest = isCrowded() ? 40.0 : 1000.0,
+                         .optional = isCrowded()},
+                        text.lines.isEmpty() ? -1 : 0);
         }
     }
 
@@ -123,7 +139,7 @@ private:
             text.lines.append({RichText::plain(in ? tr("of it shortfall") : tr("shortfall")),
                                withUnit(shortfall, m_energy), m_plain, 0.85});
         const QPolygonF region = m_scene.netArea.isEmpty() ? QPolygonF(m_scene.plane.rect) : m_scene.netArea;
-        waiting.add(text, {.size = {}, .anchor = region.boundingRect().center(), .region = region});
+        waiting.add(text, {.size = {}, .anchors = {deepestPoint(region, 14.0)}, .region = region});
     }
 
     void addBoundary(Waiting &waiting, const LooseLabel &loose) const
@@ -131,7 +147,7 @@ private:
         LabelScene text = label();
         text.colour = m_style.palette.envelope.colour;
         text.lines.append({loose.text, {}, m_strong});
-        waiting.add(text, {.size = {}, .anchor = loose.anchor, .clearance = 6.0});
+        waiting.add(text, {.size = {}, .anchors = {loose.anchor}, .clearance = 6.0});
     }
 
     // What stops the path, beside the last state reached.
@@ -149,7 +165,7 @@ private:
         for (const auto &line : wrapped(utf8(units::sentence((*failed)->message, m_snapshot.units)), m_plain, 240.0))
             text.lines.append({RichText::plain(line), {}, m_plain});
         waiting.add(text, {.size = {},
-                           .anchor = m_scene.plane.pixel(reached.volume(), reached.pressure()),
+                           .anchors = {m_scene.plane.pixel(reached.volume(), reached.pressure())},
                            .clearance = handleClearance});
     }
 
@@ -171,7 +187,8 @@ private:
                  {},
                  m_plain,
                  0.9});
-            waiting.add(text, {.size = {}, .anchor = namingPoint(drawn), .clearance = 5.0, .optional = true});
+            waiting.add(text, {.size = {}, .anchors = pointsOn(drawn.line.first()), .clearance = 5.0, .optional = true},
+                        1);
         }
     }
 
@@ -190,12 +207,17 @@ private:
         return text;
     }
 
-    // A third along, so that the name stays off the arrow and the ends.
-    [[nodiscard]] static QPointF namingPoint(const SegmentScene &segment)
+    // Places along a line that its label may point to, off the ends and the arrow in the middle.
+    [[nodiscard]] static std::vector<QPointF> pointsOn(const QPolygonF &line)
     {
-        const QPolygonF &line = segment.line.first();
-        return pointAlong(line, 0.36 * lengthOf(line)).point;
+        std::vector<QPointF> points;
+        for (const double share : {0.36, 0.64, 0.25, 0.75})
+            points.push_back(pointAlong(line, share * lengthOf(line)).point);
+        return points;
     }
+
+    /// So many states that their figures cannot all be read beside each other.
+    [[nodiscard]] bool isCrowded() const { return m_scene.handles.size() > 16; }
 
     void addLimits(Waiting &waiting) const
     {
@@ -208,11 +230,8 @@ private:
             const QString words = ghosts > 1 || m_style.isPrint() ? tr("reversible limit of %1").arg(drawn.index + 1)
                                                                   : tr("reversible limit");
             text.lines.append({RichText::plain(words), {}, m_plain, 0.85});
-            const QPolygonF &line = drawn.limit.first();
-            waiting.add(text, {.size = {},
-                               .anchor = pointAlong(line, 0.42 * lengthOf(line)).point,
-                               .clearance = 5.0,
-                               .optional = ghosts > 1});
+            waiting.add(
+                text, {.size = {}, .anchors = pointsOn(drawn.limit.first()), .clearance = 5.0, .optional = ghosts > 1});
         }
     }
 
@@ -265,6 +284,7 @@ void addLabels(Scene &scene, const Snapshot &snapshot, const DiagramStyle &style
         LabelScene &label = waiting.labels[static_cast<qsizetype>(i)];
         label.plate = places[i]->plate;
         label.leader = places[i]->leader;
+        if (places[i]->isCompact) label.lines = shortForm(label).lines;
         scene.labels.append(label);
     }
 }

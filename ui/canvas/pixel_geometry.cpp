@@ -106,6 +106,43 @@ void eachSpan(const QPolygonF &area, const Scan &scan, double pitch, Visit visit
 
 } // namespace
 
+QPolygonF thinned(const QPolygonF &line)
+{
+    constexpr double tolerance = 0.1;
+    if (line.size() < 3) return line;
+    QPolygonF result{line.first()};
+    qsizetype from = 0;
+    for (qsizetype to = 2; to < line.size(); ++to) {
+        const QPolygonF chord{line.at(from), line.at(to)};
+        bool isNear = true;
+        for (qsizetype i = from + 1; i < to && isNear; ++i) isNear = distanceTo(chord, line.at(i)) <= tolerance;
+        if (isNear) continue;
+        from = to - 1;
+        result.append(line.at(from));
+    }
+    result.append(line.last());
+    return result;
+}
+
+QPointF deepestPoint(const QPolygonF &area, double step)
+{
+    QPolygonF outline = area;
+    if (!outline.isEmpty()) outline.append(outline.first());
+    const QRectF extent = area.boundingRect();
+    QPointF best = extent.center();
+    double depth = 0.0;
+    for (double y = extent.top() + step / 2.0; y < extent.bottom(); y += step)
+        for (double x = extent.left() + step / 2.0; x < extent.right(); x += step) {
+            const QPointF point(x, y);
+            if (!area.containsPoint(point, Qt::OddEvenFill)) continue;
+            const double here = distanceTo(outline, point);
+            if (here <= depth) continue;
+            depth = here;
+            best = point;
+        }
+    return best;
+}
+
 QList<QPolygonF> clippedLine(const QPolygonF &line, const QRectF &rect)
 {
     QList<QPolygonF> pieces;

@@ -10,6 +10,14 @@
 namespace quasistat::ui
 {
 
+/// `line` with as few of its points as keep it within a tenth of a pixel: what no eye can tell, and much faster to
+/// draw.
+[[nodiscard]] QPolygonF thinned(const QPolygonF &line);
+
+/// A point deep inside `area`: far from its edges, on a grid of `step` pixels; the middle of its extent if none is
+/// inside.
+[[nodiscard]] QPointF deepestPoint(const QPolygonF &area, double step);
+
 /// The pieces of `line` inside `rect`.
 [[nodiscard]] QList<QPolygonF> clippedLine(const QPolygonF &line, const QRectF &rect);
 /// The part of the area inside `rect` (Sutherland–Hodgman; a concave area may keep edges along the rectangle).

@@ -39,13 +39,14 @@ std::vector<EndKey> endKeys(const path::Process &process)
     return {found == choice.keys.end() ? EndKey::volume : *found};
 }
 
-Outcome<Json> ends(const gas::State &from, const path::Segment &segment, const Snapshot &before, const Pull &pull)
+Outcome<Json> ends(const path::Segment &segment, const Snapshot &before, const Pull &pull)
 {
-    const auto point = path::nearestEnd(from, segment, pull.volume, pull.pressure, pull.plane.metric());
+    const auto &states = before.evaluation->path.states;
+    const auto point = path::nearestEnd(states, segment, {pull.volume, pull.pressure}, pull.plane.metric());
     if (!point) return point.failure();
     Json end = Json::object();
     for (const EndKey key : endKeys(segment.process)) {
-        const auto value = path::endValueAt(from, *point, key);
+        const auto value = path::endValueAt(states.back().state, *point, key);
         if (!value) return Failure{Reason::undetermined, "/end", {"This kind has no end there.", {}}};
         auto typed = typedEnd(*value, key, Json(), before, pull.plane);
         if (!typed) return typed.failure();
@@ -74,7 +75,7 @@ Outcome<document::Edited> segmentPlaced(const Snapshot &before, Kind kind, const
         json["external_pressure"] = *pressure;
         json["end"] = "balance";
     } else {
-        auto end = ends(path.states.back().state, segment, before, pull);
+        auto end = ends(segment, before, pull);
         if (!end) return end.failure();
         json["end"] = *end;
     }

@@ -81,6 +81,7 @@ struct LabelScene {
     QRectF plate;
     std::optional<QLineF> leader;
     bool dotted = false; ///< the leader ends in a dot on its thing
+    int shortLines = -1; ///< lines that the shorter form keeps; −1: it has none
 };
 
 struct Scene {

@@ -20,12 +20,15 @@ QRectF drawn(const Plane &plane)
     return plane.rect.adjusted(-2, -2, 2, 2);
 }
 
-// The line that is drawn in the family's dash: what the surroundings see where that is another line than the states
-// passed.
+QPolygonF pixels(const Plane &plane, const path::Polyline &line)
+{
+    return thinned(plane.pixels(line));
+}
+
+// The line in the family's dash: against a constant pressure the level alone, which dotted drops join to the states.
 const path::Polyline &drawnLine(const path::SegmentResult &segment)
 {
-    const bool level = segment.kind == path::Kind::constantExternalPressure || segment.kind == path::Kind::stepped;
-    return level && !segment.drawing.workLine.empty() ? segment.drawing.workLine : segment.drawing.curve;
+    return segment.kind == path::Kind::constantExternalPressure ? segment.drawing.workLine : segment.drawing.curve;
 }
 
 QPolygonF downToZero(QPolygonF line, const Plane &plane)
@@ -37,10 +40,25 @@ QPolygonF downToZero(QPolygonF line, const Plane &plane)
     return line;
 }
 
-QPolygonF arrowHead(const QPolygonF &line)
+// The straight piece of a line at a distance along it.
+QPolygonF pieceAt(const QPolygonF &line, double distance)
 {
+    for (qsizetype i = 0; i + 1 < line.size(); ++i) {
+        const double length = QLineF(line.at(i), line.at(i + 1)).length();
+        if (distance <= length) return {line.at(i), line.at(i + 1)};
+        distance -= length;
+    }
+    return line;
+}
+
+QPolygonF arrowHead(const QPolygonF &whole)
+{
+    const double middle = lengthOf(whole) / 2.0;
+    if (2.0 * middle < roomForHead) return {};
+    // On a staircase the middle of the step, not its corner.
+    const QPolygonF step = pieceAt(whole, middle);
+    const QPolygonF line = lengthOf(step) > 1.5 * headLength ? step : whole;
     const double length = lengthOf(line);
-    if (length < roomForHead) return {};
     const auto [tip, along] = pointAlong(line, length / 2.0 + headLength / 2.0);
     const QPointF across(-along.y(), along.x());
     const QPointF back = tip - along * headLength;
@@ -73,10 +91,10 @@ QList<QLineF> drops(const path::SegmentResult &segment, const QPolygonF &line, c
 
 void addLimit(SegmentScene &scene, const path::Drawing &drawing, const Plane &plane, const DiagramStyle &style)
 {
-    const QPolygonF limit = plane.pixels(drawing.reversibleLimit);
+    const QPolygonF limit = pixels(plane, drawing.reversibleLimit);
     scene.limit = clippedLine(limit, drawn(plane));
     if (!drawing.hatchShortfall || limit.size() < 2) return;
-    QPolygonF between = plane.pixels(drawing.workLine);
+    QPolygonF between = pixels(plane, drawing.workLine);
     std::for_each(limit.rbegin(), limit.rend(), [&](QPointF point) { between.append(point); });
     scene.hatch = hatchLines(clippedArea(between, plane.rect), style.palette.shortfall.pitch);
 }
@@ -87,15 +105,15 @@ SegmentScene segmentScene(int index, const path::SegmentResult &segment, const P
     SegmentScene scene;
     scene.index = index;
     scene.kind = segment.kind;
-    const QPolygonF line = plane.pixels(drawnLine(segment));
+    const QPolygonF line = pixels(plane, drawnLine(segment));
     scene.line = clippedLine(line, drawn(plane));
     scene.drops = drops(segment, line, plane);
     scene.head = arrowHead(longest(scene.line));
     scene.workIn = segment.work > 0.0;
     if (drawing.areaIsWork && segment.work != 0.0)
-        scene.area = clippedArea(downToZero(plane.pixels(drawing.workLine), plane), plane.rect);
+        scene.area = clippedArea(downToZero(pixels(plane, drawing.workLine), plane), plane.rect);
     if (drawing.dashedOutline) {
-        QPolygonF outline = downToZero(plane.pixels(drawing.curve), plane);
+        QPolygonF outline = downToZero(pixels(plane, drawing.curve), plane);
         if (!outline.isEmpty()) outline.append(outline.first());
         scene.outline = clippedLine(outline, plane.rect);
     }
@@ -127,7 +145,7 @@ void addNetArea(Scene &scene, const path::PathResult &path, const DiagramStyle &
                                           [](const auto &segment) { return segment.drawing.areaIsWork; });
     if (path.totals.closed && areasAreWork && path.totals.netWorkOut != 0.0) {
         QPolygonF loop;
-        for (const auto &segment : path.segments) loop += scene.plane.pixels(segment.drawing.workLine);
+        for (const auto &segment : path.segments) loop += pixels(scene.plane, segment.drawing.workLine);
         scene.netArea = clippedArea(loop, scene.plane.rect);
         scene.netWorkIn = path.totals.netWorkOut < 0.0;
         QPainterPath net;

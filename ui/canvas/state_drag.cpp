@@ -16,6 +16,7 @@ namespace
 using document::Edited;
 using document::Json;
 using path::EndKey;
+using States = std::span<const path::StateResult>;
 
 bool isEnergy(EndKey key)
 {
@@ -79,12 +80,12 @@ const Json &typedBefore(const Json &segment, EndKey key)
 }
 
 // A level against constant external pressure ends at balance; pulled up to there or beyond, it says so.
-bool isAtBalance(const gas::State &from, const path::Segment &segment, const path::SlidePoint &point,
-                 const Plane &plane)
+bool isAtBalance(States states, const path::Segment &segment, const path::SlidePoint &point, const Plane &plane)
 {
     if (path::kindOf(segment.process) != path::Kind::constantExternalPressure) return false;
-    const double far = point.volume > from.volume() ? 1e3 : 1e-3;
-    const auto balance = path::nearestEnd(from, segment, from.volume() * far, point.pressure, plane.metric());
+    const double start = states.back().state.volume();
+    const double far = start * (point.volume > start ? 1e3 : 1e-3);
+    const auto balance = path::nearestEnd(states, segment, {far, point.pressure}, plane.metric());
     return balance && std::abs(balance->volume - point.volume) * plane.metric().volumeScale < 3.0;
 }
 
@@ -105,13 +106,14 @@ Outcome<Edited> endDragged(const Snapshot &before, std::size_t index, const Pull
     const auto &parsed = evaluation.input.segments.at(index);
     if (!parsed) return parsed.failure();
     const path::Segment &segment = *parsed;
-    const gas::State &from = evaluation.path.states.at(index).state;
-    const auto point = path::nearestEnd(from, segment, pull.volume, pull.pressure, pull.plane.metric());
+    const States states = States(evaluation.path.states).first(index + 1);
+    const gas::State &from = states.back().state;
+    const auto point = path::nearestEnd(states, segment, {pull.volume, pull.pressure}, pull.plane.metric());
     if (!point) return point.failure();
 
     Edited edited{before.design, {}};
     Json &json = edited.design.json.at("segments").at(index);
-    if (isAtBalance(from, segment, *point, pull.plane)) {
+    if (isAtBalance(states, segment, *point, pull.plane)) {
         json["end"] = "balance";
         return edited;
     }

@@ -4,6 +4,8 @@
 #include "ui/look/figure_text.h"
 #include "ui/look/type.h"
 
+#include <cmath>
+
 namespace quasistat::ui
 {
 namespace
@@ -30,14 +32,18 @@ void paintForbidden(QPainter &painter, const Painting &p)
 void paintGrid(QPainter &painter, const Painting &p)
 {
     painter.setRenderHint(QPainter::Antialiasing, false);
-    painter.setPen(QPen(p.style.palette.grid(), 1.0));
     const QRectF &rect = p.scene.plane.rect;
-    for (const auto &tick : p.scene.axes.volume)
-        painter.drawLine(QLineF(tick.place, rect.top(), tick.place, rect.bottom()));
-    for (const auto &tick : p.scene.axes.pressure)
-        painter.drawLine(QLineF(rect.left(), tick.place, rect.right(), tick.place));
-    painter.drawLine(QLineF(rect.left(), rect.top(), rect.right(), rect.top()));
-    painter.setRenderHint(QPainter::Antialiasing);
+    const QColor colour = p.style.palette.grid();
+    // Filled, not stroked: a translucent hairline is sharp and cheap that way.
+    const auto upright = [&](double x) {
+        painter.fillRect(QRectF(std::round(x), rect.top(), 1.0, rect.height()), colour);
+    };
+    const auto level = [&](double y) {
+        painter.fillRect(QRectF(rect.left(), std::round(y), rect.width(), 1.0), colour);
+    };
+    for (const auto &tick : p.scene.axes.volume) upright(tick.place);
+    for (const auto &tick : p.scene.axes.pressure) level(tick.place);
+    level(rect.top());
 }
 
 void drawDots(QPainter &painter, const QList<QLineF> &rows, const QColor &colour)
@@ -53,6 +59,8 @@ void paintAreas(QPainter &painter, const Painting &p)
 {
     const Palette &palette = p.style.palette;
     const auto look = [&](bool in) -> const WorkFill & { return in ? palette.workIn : palette.workOut; };
+    // The edges lie under curves; not smoothed, neighbouring areas join without a seam.
+    painter.setRenderHint(QPainter::Antialiasing, false);
     painter.setPen(Qt::NoPen);
     if (!p.scene.netArea.isEmpty()) {
         const WorkFill &fill = look(p.scene.netWorkIn);
@@ -63,8 +71,9 @@ void paintAreas(QPainter &painter, const Painting &p)
         const WorkFill &fill = look(segment.workIn);
         painter.fillPath(segment.fill, faded(fill.colour, fill.opacity));
     }
-    drawDots(painter, p.scene.netDots, faded(palette.workOut.colour, 0.55));
-    for (const auto &segment : p.scene.segments) drawDots(painter, segment.dots, faded(palette.workOut.colour, 0.55));
+    painter.setRenderHint(QPainter::Antialiasing);
+    drawDots(painter, p.scene.netDots, faded(palette.workOut.colour, 0.7));
+    for (const auto &segment : p.scene.segments) drawDots(painter, segment.dots, faded(palette.workOut.colour, 0.7));
 }
 
 void paintHatch(QPainter &painter, const Painting &p)
@@ -152,7 +161,8 @@ void paintHalo(QPainter &painter, const Painting &p)
     drawLines(painter, p.scene.boundary.violated);
 }
 
-void paintCurve(QPainter &painter, const SegmentScene &segment, const FamilyLook &look, double width)
+// `dashUnit`: the width that dashes are measured in, so that a thickened curve keeps its pattern in place.
+void paintCurve(QPainter &painter, const SegmentScene &segment, const FamilyLook &look, double width, double dashUnit)
 {
     painter.setBrush(Qt::NoBrush);
     if (look.dash.isEmpty()) {
@@ -162,7 +172,9 @@ void paintCurve(QPainter &painter, const SegmentScene &segment, const FamilyLook
         painter.setPen(QPen(faded(look.colour, 0.55), 1.0));
         drawLines(painter, segment.line);
         QPen dashed(look.colour, width, Qt::CustomDashLine, Qt::FlatCap, Qt::RoundJoin);
-        dashed.setDashPattern(look.dash);
+        QList<qreal> dash = look.dash;
+        for (qreal &length : dash) length *= dashUnit / width;
+        dashed.setDashPattern(dash);
         painter.setPen(dashed);
         drawLines(painter, segment.line);
     }
@@ -175,7 +187,7 @@ void paintCurve(QPainter &painter, const SegmentScene &segment, const FamilyLook
 void paintCurves(QPainter &painter, const Painting &p)
 {
     for (const auto &segment : p.scene.segments)
-        paintCurve(painter, segment, p.style.palette.family(segment.kind), p.style.curve);
+        paintCurve(painter, segment, p.style.palette.family(segment.kind), p.style.curve, p.style.curve);
 }
 
 bool isEndOf(const HandleScene &handle, int segment)
@@ -188,7 +200,7 @@ void paintEmphasis(QPainter &painter, const Painting &p)
     if (p.style.isPrint()) return;
     for (const auto &segment : p.scene.segments)
         if (segment.index == p.emphasis.selected || segment.index == p.emphasis.hovered)
-            paintCurve(painter, segment, p.style.palette.family(segment.kind), p.style.emphasisedCurve);
+            paintCurve(painter, segment, p.style.palette.family(segment.kind), p.style.emphasisedCurve, p.style.curve);
     painter.setBrush(Qt::NoBrush);
     painter.setPen(QPen(p.style.palette.accent, 2.0));
     for (const auto &handle : p.scene.handles)

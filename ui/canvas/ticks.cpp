@@ -27,9 +27,9 @@ double EngineeringTicker::getTickStep(const QCPRange &range)
 
 QString tickText(double place, int decimals)
 {
-    QString text = QString::number(std::abs(place), 'f', decimals);
-    const bool isZero = text.toDouble() == 0.0;
-    return place < 0.0 && !isZero ? QChar(0x2212) + text : text;
+    const QString text = QString::number(std::abs(place), 'f', decimals);
+    if (text.toDouble() == 0.0) return QStringLiteral("0");
+    return place < 0.0 ? QChar(0x2212) + text : text;
 }
 
 } // namespace quasistat::ui

@@ -47,7 +47,8 @@ std::string uncertaintyTail(const Json &typed)
     if (!typed.is_string()) return {};
     const auto text = typed.get<std::string>();
     for (const char *mark : {"±", "+/-"})
-        if (const auto at = text.find(mark); at != std::string::npos) return " " + text.substr(at);
+        if (const auto at = text.find(mark); at != std::string::npos)
+            return std::string(1, ' ').append(text, at, std::string::npos);
     return {};
 }
 
@@ -60,23 +61,9 @@ double rounded(double value, int digits)
 
 } // namespace
 
-units::Quantity quantityOf(EndKey key)
-{
-    switch (key) {
-    case EndKey::pressure: return units::Quantity::pressure;
-    case EndKey::volume: return units::Quantity::volume;
-    case EndKey::temperature: return units::Quantity::temperature;
-    case EndKey::pressureRatio:
-    case EndKey::volumeRatio: return units::Quantity::number;
-    case EndKey::work:
-    case EndKey::heat: return units::Quantity::energy;
-    }
-    return units::Quantity::number;
-}
-
 Outcome<Json> typedEnd(double value, EndKey key, const Json &typed, const Snapshot &snapshot, const Plane &plane)
 {
-    const units::Quantity quantity = quantityOf(key);
+    const units::Quantity quantity = path::quantityOf(key);
     const int digits = significantDigits(value, key, plane);
     const std::string tail = uncertaintyTail(typed);
     if (quantity == units::Quantity::number) {

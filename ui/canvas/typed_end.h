@@ -8,8 +8,6 @@
 namespace quasistat::ui
 {
 
-[[nodiscard]] units::Quantity quantityOf(path::EndKey key);
-
 /// `value` [SI] of `key` as JSON: in the unit of `typed` (what stood there; null: nothing), else in the display's unit.
 /// An uncertainty that was stated stays.
 [[nodiscard]] Outcome<document::Json> typedEnd(double value, path::EndKey key, const document::Json &typed,

@@ -165,8 +165,10 @@ void FormView::buildValue(Line &line)
     });
     connect(line.value, &TextField::entered, this, [this, id](const QString &text) {
         Line *left = lineOf(id);
-        if (m_rejectsInvalid && !complaintOf(left->field, text).isEmpty()) left->value->setModified(true);
-        else emit entered(id, text);
+        if (m_rejectsInvalid && !complaintOf(left->field, text).isEmpty())
+            left->value->setModified(true);
+        else
+            emit entered(id, text);
     });
     connect(line.value, &TextField::restored, this, [this, id] {
         say(*lineOf(id), {});

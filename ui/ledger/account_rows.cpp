@@ -104,16 +104,18 @@ void addRoutes(std::vector<LedgerRow> &rows, const SegmentResult &segment, int i
 {
     const double sign = shownSign(snapshot.units);
     const bool quasiStatic = path::facts(segment.kind).quasiStatic;
-    rows.push_back(routeRow(quasiStatic ? say("−∫<i>p</i> d<i>V</i>, by quadrature") : say("<i>W</i>, against the load"),
-                            fine(sign * segment.work, scale), index));
+    rows.push_back(
+        routeRow(quasiStatic ? say("−∫<i>p</i> d<i>V</i>, by quadrature") : say("<i>W</i>, against the load"),
+                 fine(sign * segment.work, scale), index));
     if (segment.audit.heatByEntropy)
-        rows.push_back(routeRow(say("∫<i>T</i> d<i>S</i>, by quadrature"), fine(sign * *segment.audit.heatByEntropy, scale),
-                                index));
+        rows.push_back(routeRow(say("∫<i>T</i> d<i>S</i>, by quadrature"),
+                                fine(sign * *segment.audit.heatByEntropy, scale), index));
     else
         rows.push_back(routeRow(say("<i>Q</i>, by its own route"), fine(sign * segment.heat, scale), index));
-    const QString difference = quasiStatic ? say("Δ<i>U</i> − <i>W</i> − ∫<i>T</i> d<i>S</i>")
-                                           : say("Δ<i>U</i> − <i>W</i> − <i>Q</i>");
-    rows.push_back(routeRow(difference, residualWords(segment.audit.firstLawResidual, segment.audit, snapshot.units), index));
+    const QString difference =
+        quasiStatic ? say("Δ<i>U</i> − <i>W</i> − ∫<i>T</i> d<i>S</i>") : say("Δ<i>U</i> − <i>W</i> − <i>Q</i>");
+    rows.push_back(
+        routeRow(difference, residualWords(segment.audit.firstLawResidual, segment.audit, snapshot.units), index));
     if (!quasiStatic)
         rows.push_back(routeRow(say("lost work, two routes differ by"),
                                 residualWords(segment.audit.lostWorkResidual, segment.audit, snapshot.units), index));
@@ -156,7 +158,8 @@ LedgerRow failedRow(int index, const Failure &failure, const Snapshot &snapshot)
     return row;
 }
 
-LedgerRow totalRow(const path::PathResult &path, const units::Scale &scale, const units::DisplayUnits &units, bool agree)
+LedgerRow totalRow(const path::PathResult &path, const units::Scale &scale, const units::DisplayUnits &units,
+                   bool agree)
 {
     LedgerRow row{.kind = LedgerRowKind::total};
     row.id = QStringLiteral("total");

@@ -24,10 +24,10 @@ struct LimitKey {
     LimitQuantity quantity;
 };
 constexpr LimitKey limitKeys[] = {
-    {"pressure", LimitQuantity::pressure},        {"temperature", LimitQuantity::temperature},
-    {"volume", LimitQuantity::volume},            {"pressure_ratio", LimitQuantity::pressureRatio},
-    {"work", LimitQuantity::work},                {"heat", LimitQuantity::heat},
-    {"amount", LimitQuantity::amount},            {"stored_energy", LimitQuantity::storedEnergy},
+    {"pressure", LimitQuantity::pressure}, {"temperature", LimitQuantity::temperature},
+    {"volume", LimitQuantity::volume},     {"pressure_ratio", LimitQuantity::pressureRatio},
+    {"work", LimitQuantity::work},         {"heat", LimitQuantity::heat},
+    {"amount", LimitQuantity::amount},     {"stored_energy", LimitQuantity::storedEnergy},
 };
 
 int limitCount(const document::Design &design)
@@ -124,9 +124,10 @@ EnvelopeDrawer::EnvelopeDrawer(Session &session, QWidget *parent)
     another->setObjectName(QStringLiteral("addLimit"));
     connect(another, &QPushButton::clicked, this, &EnvelopeDrawer::add);
     column->addWidget(another);
-    column->addWidget(wrapped(tr("Results are estimates for planning. Pressure equipment, relief and oxygen service are "
-                                 "governed by local codes and must be reviewed by a competent person."),
-                              this));
+    column->addWidget(
+        wrapped(tr("Results are estimates for planning. Pressure equipment, relief and oxygen service are "
+                   "governed by local codes and must be reviewed by a competent person."),
+                this));
     connect(&session, &Session::snapshotChanged, this, &EnvelopeDrawer::refresh);
     refresh();
 }
@@ -181,7 +182,8 @@ QWidget *EnvelopeDrawer::createLimit(int limit)
     column->addWidget(fields);
     column->addWidget(gone, 0, Qt::AlignRight);
     connect(gone, &QPushButton::clicked, this, [this, limit] { remove(limit); });
-    connect(fields, &FormView::chosen, this, [this, limit](const QString &, const QString &key) { choose(limit, key); });
+    connect(fields, &FormView::chosen, this,
+            [this, limit](const QString &, const QString &key) { choose(limit, key); });
     connect(fields, &FormView::typed, this,
             [this, limit](const QString &id, const QString &text) { enter(limit, id, text, true); });
     connect(fields, &FormView::entered, this,
@@ -238,13 +240,16 @@ void EnvelopeDrawer::enter(int limit, const QString &id, const QString &text, bo
     const std::string pointer = pointerOf(limit, "/" + id.toStdString());
     const bool number = form(limit)->field(id)->content == FieldContent::number && !text.trimmed().isEmpty();
     const document::Design &base = m_session.base().design;
-    const document::Design changed = number ? withValue(base, pointer, numberAsTyped(text)) : withText(base, pointer, text);
+    const document::Design changed =
+        number ? withValue(base, pointer, numberAsTyped(text)) : withText(base, pointer, text);
     if (const auto fault = m_session.faultIn(changed)) {
         if (!previewOnly) form(limit)->refuse(id, sentenceOf(*fault, m_session.now().units));
         return;
     }
-    if (previewOnly) m_session.preview(changed);
-    else m_session.apply(changed, tr("Change a limit"));
+    if (previewOnly)
+        m_session.preview(changed);
+    else
+        m_session.apply(changed, tr("Change a limit"));
 }
 
 void EnvelopeDrawer::paintEvent(QPaintEvent *)
@@ -256,8 +261,10 @@ void EnvelopeDrawer::paintEvent(QPaintEvent *)
 
 void EnvelopeDrawer::keyPressEvent(QKeyEvent *event)
 {
-    if (event->key() == Qt::Key_Escape) emit closed();
-    else QWidget::keyPressEvent(event);
+    if (event->key() == Qt::Key_Escape)
+        emit closed();
+    else
+        QWidget::keyPressEvent(event);
 }
 
 } // namespace quasistat::ui

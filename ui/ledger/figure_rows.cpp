@@ -1,8 +1,8 @@
+#include "ui/fields/form_field.h"
 #include "ui/ledger/formulas.h"
 #include "ui/ledger/ledger_rows.h"
 #include "ui/session/design_reading.h"
 #include "ui/session/sentences.h"
-#include "ui/fields/form_field.h"
 #include "ui/strip/segment_words.h"
 
 #include <QCoreApplication>
@@ -34,8 +34,9 @@ public:
 
     void add(const char *key, const QString &words, double value, Quantity quantity)
     {
-        const units::Scale scale = quantity == Quantity::number ? units::Scale{.unit = {}, .decimals = 4}
-                                                                : units::scaleFor(quantity, std::span(&value, 1), m_units);
+        const units::Scale scale = quantity == Quantity::number
+                                       ? units::Scale{.unit = {}, .decimals = 4}
+                                       : units::scaleFor(quantity, std::span(&value, 1), m_units);
         push(key, words, figure(value, scale), QString::fromStdString(scale.unit));
     }
     void add(const char *key, const QString &words, const std::optional<double> &value, Quantity quantity)
@@ -112,7 +113,8 @@ QString atSurroundings(const analysis::Evaluation &evaluation, const units::Disp
 void addMachineFigures(FigureList &list, const Snapshot &snapshot)
 {
     const path::Totals &totals = snapshot.evaluation->path.totals;
-    list.add("mean_effective_pressure", say("mean effective pressure"), totals.meanEffectivePressure, Quantity::pressure);
+    list.add("mean_effective_pressure", say("mean effective pressure"), totals.meanEffectivePressure,
+             Quantity::pressure);
     list.add("thermal_efficiency", say("thermal efficiency"), totals.thermalEfficiency, Quantity::number);
     list.add("cop_heating", say("coefficient of performance, heating"), totals.copHeating, Quantity::number);
     list.add("cop_cooling", say("coefficient of performance, cooling"), totals.copCooling, Quantity::number);
@@ -151,10 +153,10 @@ void addState(FigureList &list, const path::StateResult &state, int number, cons
     if (!state.storedEnergy) return;
     list.add("stored_energy", say("state %1: stored energy").arg(number), state.storedEnergy->real, Quantity::energy);
     constexpr double tntEnergy = 4.184e6; // [J/kg], the usual convention for TNT equivalents
-    list.addText(say("as TNT equivalent"),
-                 shownFigure(state.storedEnergy->real / tntEnergy, Quantity::mass, units));
-    list.addSentence(say("An estimate of what a sudden release could set free, for planning only. Pressure equipment must be "
-                         "reviewed by a competent person."));
+    list.addText(say("as TNT equivalent"), shownFigure(state.storedEnergy->real / tntEnergy, Quantity::mass, units));
+    list.addSentence(
+        say("An estimate of what a sudden release could set free, for planning only. Pressure equipment must be "
+            "reviewed by a competent person."));
 }
 
 } // namespace
@@ -171,7 +173,8 @@ std::vector<LedgerRow> pathFigureRows(const Snapshot &snapshot, const LedgerOpen
     list.addAt("heat_in", say("heat in"), totals.heatIn, scale);
     list.addAt("heat_out", say("heat out"), totals.heatOut, scale);
     if (totals.steadyFlowWork)
-        list.addAt("steady_flow_work", say("steady-flow work"), shownSign(snapshot.units) * *totals.steadyFlowWork, scale);
+        list.addAt("steady_flow_work", say("steady-flow work"), shownSign(snapshot.units) * *totals.steadyFlowWork,
+                   scale);
     list.add("entropy_generated", say("entropy generated"), totals.entropyGenerated, Quantity::entropy);
     list.addAt("lost_work", atSurroundings(*snapshot.evaluation, snapshot.units), totals.lostWork, scale);
     addMachineFigures(list, snapshot);
@@ -186,8 +189,8 @@ std::vector<LedgerRow> segmentFigureRows(const Snapshot &snapshot, int segment, 
     if (segment < 0 || static_cast<std::size_t>(segment) >= path.segments.size()) return {};
     const SegmentResult &result = path.segments[static_cast<std::size_t>(segment)];
     const QString title = segmentTitle(*segmentAt(snapshot.design, segment));
-    std::vector<LedgerRow> rows{sectionRow(QStringLiteral("segment"), say("Segment %1, %2").arg(segment + 1).arg(title), true,
-                                           open.segmentFigures)};
+    std::vector<LedgerRow> rows{sectionRow(QStringLiteral("segment"), say("Segment %1, %2").arg(segment + 1).arg(title),
+                                           true, open.segmentFigures)};
     if (!open.segmentFigures) return rows;
 
     const double sign = shownSign(snapshot.units);
@@ -201,7 +204,8 @@ std::vector<LedgerRow> segmentFigureRows(const Snapshot &snapshot, int segment, 
     addIrreversibility(list, result, snapshot);
     list.addText(QStringLiteral("<i>p</i>"), rangeText(result.extrema.pressure, Quantity::pressure, snapshot.units));
     list.addText(QStringLiteral("<i>V</i>"), rangeText(result.extrema.volume, Quantity::volume, snapshot.units));
-    list.addText(QStringLiteral("<i>T</i>"), rangeText(result.extrema.temperature, Quantity::temperature, snapshot.units));
+    list.addText(QStringLiteral("<i>T</i>"),
+                 rangeText(result.extrema.temperature, Quantity::temperature, snapshot.units));
     if (result.idealGas && !result.from.gas().isIdeal()) {
         list.add("ideal_gas_work", say("as an ideal gas: <i>W</i>"), sign * result.idealGas->work, Quantity::energy);
         list.add("ideal_gas_heat", say("as an ideal gas: <i>Q</i>"), sign * result.idealGas->heat, Quantity::energy);

@@ -46,14 +46,12 @@ const char *workMarkup(const SegmentResult &segment)
         break;
     case Kind::isobaric: return "<i>W</i> = −<i>p</i> (<i>V</i>{b} − <i>V</i>{a})";
     case Kind::isochoric: return "<i>W</i> = 0: the volume stays";
-    case Kind::polytropic:
-        return "<i>W</i> = (<i>p</i>{b}<i>V</i>{b} − <i>p</i>{a}<i>V</i>{a}) / (exponent − 1)";
+    case Kind::polytropic: return "<i>W</i> = (<i>p</i>{b}<i>V</i>{b} − <i>p</i>{a}<i>V</i>{a}) / (exponent − 1)";
     case Kind::isentropic:
         if (perfect) return "<i>W</i> = <i>n R</i> (<i>T</i>{b} − <i>T</i>{a}) / (<i>γ</i> − 1)";
         break;
     case Kind::linear: return "<i>W</i> = −½ (<i>p</i>{a} + <i>p</i>{b}) (<i>V</i>{b} − <i>V</i>{a})";
-    case Kind::constantExternalPressure:
-        return "<i>W</i> = −<i>p</i><sub>ext</sub> (<i>V</i>{b} − <i>V</i>{a})";
+    case Kind::constantExternalPressure: return "<i>W</i> = −<i>p</i><sub>ext</sub> (<i>V</i>{b} − <i>V</i>{a})";
     case Kind::stepped: return "<i>W</i> = −Σ <i>p</i><sub>ext,i</sub> Δ<i>V</i><sub>i</sub>";
     case Kind::freeExpansion: return "<i>W</i> = 0: nothing is pushed";
     }
@@ -71,7 +69,8 @@ constexpr std::array figureTable{
     FigureFormula{"heat_in", "heat in = ∫max(δ<i>Q</i>, 0) along the path", formatDefinition},
     FigureFormula{"heat_out", "heat out = ∫max(−δ<i>Q</i>, 0) along the path", formatDefinition},
     FigureFormula{"steady_flow_work", "<i>W</i><sub>flow</sub> = Δ<i>H</i> − <i>Q</i>", quantities},
-    FigureFormula{"entropy_generated", "<i>S</i><sub>gen</sub> = Δ<i>S</i> − Σ∫δ<i>Q</i>/<i>T</i><sub>b</sub>", clausius},
+    FigureFormula{"entropy_generated", "<i>S</i><sub>gen</sub> = Δ<i>S</i> − Σ∫δ<i>Q</i>/<i>T</i><sub>b</sub>",
+                  clausius},
     FigureFormula{"lost_work", "lost work = <i>T</i><sub>0</sub> <i>S</i><sub>gen</sub>", gouyStodola},
     FigureFormula{"mean_effective_pressure", "mep = |net work| / (<i>V</i><sub>max</sub> − <i>V</i><sub>min</sub>)",
                   formatDefinition},
@@ -89,8 +88,10 @@ constexpr std::array figureTable{
     FigureFormula{"shortfall", "shortfall = <i>W</i> − <i>W</i><sub>rev</sub>", formatDefinition},
     FigureFormula{"recovery", "<i>W</i>/<i>W</i><sub>rev</sub> expanding, <i>W</i><sub>rev</sub>/<i>W</i> compressing",
                   formatDefinition},
-    FigureFormula{"ideal_gas_work", "<i>W</i> from the same start with the ideal part of the equation", formatDefinition},
-    FigureFormula{"ideal_gas_heat", "<i>Q</i> from the same start with the ideal part of the equation", formatDefinition},
+    FigureFormula{"ideal_gas_work", "<i>W</i> from the same start with the ideal part of the equation",
+                  formatDefinition},
+    FigureFormula{"ideal_gas_heat", "<i>Q</i> from the same start with the ideal part of the equation",
+                  formatDefinition},
     FigureFormula{"available_work",
                   "(<i>U</i>−<i>U</i><sub>0</sub>) + <i>p</i><sub>0</sub>(<i>V</i>−<i>V</i><sub>0</sub>) − "
                   "<i>T</i><sub>0</sub>(<i>S</i>−<i>S</i><sub>0</sub>)",

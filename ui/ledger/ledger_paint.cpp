@@ -37,8 +37,10 @@ void drawArrowHead(QPainter &painter, QPointF centre, bool down, const QColor &c
 
 void drawFitted(QPainter &painter, QPointF at, const RichText &text, const QFont &font, double width)
 {
-    if (textWidth(text, font) <= width) drawText(painter, at, text, font);
-    else drawText(painter, at, elided(text.unstyled(), font, width), font);
+    if (textWidth(text, font) <= width)
+        drawText(painter, at, text, font);
+    else
+        drawText(painter, at, elided(text.unstyled(), font, width), font);
 }
 
 } // namespace
@@ -91,7 +93,8 @@ void LedgerView::paintColumns(QPainter &painter, const QRectF &place)
     painter.setPen(m_look.secondary());
     drawText(painter, {margin, place.top() + 14}, tr("segment"), labelFace());
     painter.setPen(faded(m_look.ink, 0.85));
-    static const QString heads[] = {QStringLiteral("<i>W</i>"), QStringLiteral("<i>Q</i>"), QStringLiteral("Δ<i>U</i>")};
+    static const QString heads[] = {QStringLiteral("<i>W</i>"), QStringLiteral("<i>Q</i>"),
+                                    QStringLiteral("Δ<i>U</i>")};
     for (int column = 0; column < 3; ++column)
         drawText(painter, {columnRight(column), place.top() + 14}, RichText::marked(heads[column]), bodyFace(),
                  Align::right);
@@ -127,8 +130,10 @@ void LedgerView::paintAccountRow(QPainter &painter, const LedgerRow &row, const 
         }
     }
     if (row.mark) drawMark(painter, *row.mark, {width() - 22.0, y - 4.5}, markColour(*row.mark, m_look), m_look.panel);
-    if (total) drawRule(painter, place.top() + 0.5, margin, width() - margin, faded(m_look.ink, 0.7), 1.25);
-    else drawRule(painter, place.bottom() - 0.5, margin, width() - margin, faded(m_look.ink, 0.1));
+    if (total)
+        drawRule(painter, place.top() + 0.5, margin, width() - margin, faded(m_look.ink, 0.7), 1.25);
+    else
+        drawRule(painter, place.bottom() - 0.5, margin, width() - margin, faded(m_look.ink, 0.1));
 }
 
 void LedgerView::paintOpenedRow(QPainter &painter, const LedgerRow &row, const QRectF &place)
@@ -162,8 +167,7 @@ void LedgerView::paintSection(QPainter &painter, const LedgerRow &row, const QRe
 {
     painter.setPen(m_look.ink);
     drawFitted(painter, {margin, place.top() + 25}, row.label, titleFace(), width() - 2 * margin - 20);
-    if (row.opens)
-        drawArrowHead(painter, {width() - margin - 6, place.top() + 21}, row.isOpen, faded(m_look.ink, 0.6));
+    if (row.opens) drawArrowHead(painter, {width() - margin - 6, place.top() + 21}, row.isOpen, faded(m_look.ink, 0.6));
     drawRule(painter, place.bottom() - 1.5, margin, width() - margin, faded(m_look.ink, 0.25));
 }
 
@@ -185,8 +189,7 @@ void LedgerView::paintLimitRow(QPainter &painter, const LedgerRow &row, const QR
 {
     const double y = place.top() + 19;
     const QFont font = face(13, row.warned ? QFont::DemiBold : QFont::Normal);
-    if (row.mark)
-        drawMark(painter, *row.mark, {margin + 6, y - 4.5}, markColour(*row.mark, m_look), m_look.panel);
+    if (row.mark) drawMark(painter, *row.mark, {margin + 6, y - 4.5}, markColour(*row.mark, m_look), m_look.panel);
     painter.setPen(row.warned ? m_look.warning : m_look.ink);
     const QString worst = row.figures.value(0);
     const double left = margin + 22;
@@ -206,7 +209,8 @@ void LedgerView::paintTextRow(QPainter &painter, const LedgerRow &row, const QRe
     const double wide = width() - margin - left;
     if (textWidth(row.label, labelFace()) <= wide)
         drawText(painter, {left, place.top() + 15}, row.label, labelFace());
-    else drawWrapped(painter, QRectF(left, place.top() + 3, wide, place.height()), text, labelFace());
+    else
+        drawWrapped(painter, QRectF(left, place.top() + 3, wide, place.height()), text, labelFace());
 }
 
 } // namespace quasistat::ui

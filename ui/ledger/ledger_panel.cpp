@@ -37,8 +37,10 @@ void LedgerPanel::setEnvelopeOpen(bool open)
     if (open == m_envelopeOpen) return;
     m_envelopeOpen = open;
     placeDrawer(true);
-    if (open) m_envelope->setFocus(Qt::OtherFocusReason);
-    else m_ledger->setFocus(Qt::OtherFocusReason);
+    if (open)
+        m_envelope->setFocus(Qt::OtherFocusReason);
+    else
+        m_ledger->setFocus(Qt::OtherFocusReason);
 }
 
 void LedgerPanel::placeDrawer(bool animated)

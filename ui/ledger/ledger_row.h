@@ -35,12 +35,12 @@ struct LedgerRow {
     QStringList figures{};
     QString unit{};
     std::optional<StateMark> mark{};
-    int segment = -1;     ///< from 0; of the rows that belong to one
-    bool struck = false;  ///< heat that failed its audit: digits struck
-    bool opens = false;   ///< has more to show
-    bool isOpen = false;  ///< and shows it
-    bool opened = false;  ///< belongs to an opened figure: on its ground
-    bool warned = false;  ///< in the warning colour
+    int segment = -1;    ///< from 0; of the rows that belong to one
+    bool struck = false; ///< heat that failed its audit: digits struck
+    bool opens = false;  ///< has more to show
+    bool isOpen = false; ///< and shows it
+    bool opened = false; ///< belongs to an opened figure: on its ground
+    bool warned = false; ///< in the warning colour
 
     [[nodiscard]] QString spoken() const; ///< the row in words
 };

@@ -33,8 +33,9 @@ LedgerRow limitRow(const analysis::Limit &limit, const analysis::Verdict &verdic
     LedgerRow row{.kind = LedgerRowKind::limit};
     row.id = QStringLiteral("limit%1").arg(verdict.limit + 1);
     const RichText terms = RichText::marked(limitTerms(limit, units));
-    row.label = limit.label.empty() ? terms
-                                    : RichText::plain(QString::fromStdString(limit.label) + QStringLiteral(", ")) + terms;
+    row.label = limit.label.empty()
+                    ? terms
+                    : RichText::plain(QString::fromStdString(limit.label) + QStringLiteral(", ")) + terms;
     row.figures = {worstFigure(limit, verdict, units)};
     row.warned = !verdict.ok;
     if (verdict.worst) row.mark = verdict.ok ? StateMark::tick : StateMark::warning;

@@ -11,14 +11,14 @@ namespace quasistat::ui
 
 /// What of the ledger stands open.
 struct LedgerOpen {
-    QString figure;               ///< id of the opened figure: "3.W", "path.lost_work"
-    bool segmentFigures = false;  ///< further figures of the selected segment
+    QString figure;              ///< id of the opened figure: "3.W", "path.lost_work"
+    bool segmentFigures = false; ///< further figures of the selected segment
 };
 
 [[nodiscard]] std::vector<LedgerRow> ledgerRows(const Snapshot &snapshot, int selected, const LedgerOpen &open);
 
-/// The scale of the account's columns: enough decimals that every row and every column closes as printed, two more than the
-/// readable ones at most.
+/// The scale of the account's columns: enough decimals that every row and every column closes as printed, two more than
+/// the readable ones at most.
 [[nodiscard]] units::Scale accountScale(const path::PathResult &path, const units::DisplayUnits &units);
 
 /// Rows of the account: columns, segments with an opened figure, total, closure.

@@ -35,6 +35,13 @@ RichText RichText::plain(const QString &text)
     return result;
 }
 
+RichText RichText::styled(const Run &run)
+{
+    RichText result;
+    if (!run.text.isEmpty()) result.m_runs.append(run);
+    return result;
+}
+
 RichText RichText::marked(const QString &markup)
 {
     RichText result;

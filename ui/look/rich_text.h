@@ -25,6 +25,8 @@ public:
     /// is itself.
     [[nodiscard]] static RichText marked(const QString &markup);
 
+    [[nodiscard]] static RichText styled(const Run &run);
+
     RichText &operator+=(const RichText &more);
     [[nodiscard]] friend RichText operator+(RichText first, const RichText &second) { return first += second; }
     [[nodiscard]] RichText inBold() const;

@@ -36,11 +36,11 @@ enum class ActionId {
 
 struct ActionFacts {
     ActionId id;
-    const char *name;   ///< object name: stable, for tests and documentation
-    const char *text;   ///< translated in the context "Actions"
-    const char *key;    ///< default key; empty: none
-    bool needsDesign;   ///< only with a design open
-    bool needsSegment;  ///< only with a segment selected
+    const char *name;  ///< object name: stable, for tests and documentation
+    const char *text;  ///< translated in the context "Actions"
+    const char *key;   ///< default key; empty: none
+    bool needsDesign;  ///< only with a design open
+    bool needsSegment; ///< only with a segment selected
 };
 
 inline constexpr std::array actionTable{
@@ -51,20 +51,25 @@ inline constexpr std::array actionTable{
     ActionFacts{ActionId::closeDesign, "close", QT_TRANSLATE_NOOP("Actions", "Close design"), "Ctrl+W", true, false},
     ActionFacts{ActionId::undo, "undo", QT_TRANSLATE_NOOP("Actions", "Undo"), "Ctrl+Z", true, false},
     ActionFacts{ActionId::redo, "redo", QT_TRANSLATE_NOOP("Actions", "Redo"), "Ctrl+Shift+Z", true, false},
-    ActionFacts{ActionId::placeNext, "placeNext", QT_TRANSLATE_NOOP("Actions", "Place next segment"), "Ctrl+I", true, false},
-    ActionFacts{ActionId::duplicate, "duplicate", QT_TRANSLATE_NOOP("Actions", "Duplicate segment"), "Ctrl+D", true, true},
+    ActionFacts{ActionId::placeNext, "placeNext", QT_TRANSLATE_NOOP("Actions", "Place next segment"), "Ctrl+I", true,
+                false},
+    ActionFacts{ActionId::duplicate, "duplicate", QT_TRANSLATE_NOOP("Actions", "Duplicate segment"), "Ctrl+D", true,
+                true},
     ActionFacts{ActionId::remove, "delete", QT_TRANSLATE_NOOP("Actions", "Delete segment"), "Del", true, true},
-    ActionFacts{ActionId::moveLeft, "moveLeft", QT_TRANSLATE_NOOP("Actions", "Move segment left"), "Alt+Left", true, true},
-    ActionFacts{ActionId::moveRight, "moveRight", QT_TRANSLATE_NOOP("Actions", "Move segment right"), "Alt+Right", true, true},
-    ActionFacts{ActionId::zoomToPath, "zoomToPath", QT_TRANSLATE_NOOP("Actions", "Zoom to path"), "Ctrl+0", true, false},
+    ActionFacts{ActionId::moveLeft, "moveLeft", QT_TRANSLATE_NOOP("Actions", "Move segment left"), "Alt+Left", true,
+                true},
+    ActionFacts{ActionId::moveRight, "moveRight", QT_TRANSLATE_NOOP("Actions", "Move segment right"), "Alt+Right", true,
+                true},
+    ActionFacts{ActionId::zoomToPath, "zoomToPath", QT_TRANSLATE_NOOP("Actions", "Zoom to path"), "Ctrl+0", true,
+                false},
     ActionFacts{ActionId::zoomIn, "zoomIn", QT_TRANSLATE_NOOP("Actions", "Zoom in"), "Ctrl++", true, false},
     ActionFacts{ActionId::zoomOut, "zoomOut", QT_TRANSLATE_NOOP("Actions", "Zoom out"), "Ctrl+-", true, false},
     ActionFacts{ActionId::envelope, "envelope", QT_TRANSLATE_NOOP("Actions", "Envelope"), "Ctrl+E", true, false},
     ActionFacts{ActionId::reportA4, "reportA4", QT_TRANSLATE_NOOP("Actions", "Report, A4…"), "Ctrl+R", true, false},
-    ActionFacts{ActionId::reportLetter, "reportLetter", QT_TRANSLATE_NOOP("Actions", "Report, Letter…"), "Ctrl+Shift+R", true,
-                false},
-    ActionFacts{ActionId::schemeSystem, "schemeSystem", QT_TRANSLATE_NOOP("Actions", "Light or dark as the system"), "", false,
-                false},
+    ActionFacts{ActionId::reportLetter, "reportLetter", QT_TRANSLATE_NOOP("Actions", "Report, Letter…"), "Ctrl+Shift+R",
+                true, false},
+    ActionFacts{ActionId::schemeSystem, "schemeSystem", QT_TRANSLATE_NOOP("Actions", "Light or dark as the system"), "",
+                false, false},
     ActionFacts{ActionId::schemeLight, "schemeLight", QT_TRANSLATE_NOOP("Actions", "Light"), "", false, false},
     ActionFacts{ActionId::schemeDark, "schemeDark", QT_TRANSLATE_NOOP("Actions", "Dark"), "", false, false},
     ActionFacts{ActionId::quit, "quit", QT_TRANSLATE_NOOP("Actions", "Quit"), "Ctrl+Q", false, false},

@@ -85,9 +85,8 @@ void HeaderBar::createFields()
     m_title->setObjectName(QStringLiteral("titleField"));
     m_title->setFont(titleFace());
     m_title->hide();
-    connect(m_title, &QLineEdit::textEdited, this, [this](const QString &text) {
-        m_session.preview(withText(m_session.base().design, "/title", text));
-    });
+    connect(m_title, &QLineEdit::textEdited, this,
+            [this](const QString &text) { m_session.preview(withText(m_session.base().design, "/title", text)); });
     connect(m_title, &TextField::entered, this, [this](const QString &text) {
         m_session.apply(withText(m_session.base().design, "/title", text), tr("Change title"));
     });
@@ -163,9 +162,12 @@ void HeaderBar::layOut()
 
 void HeaderBar::click(HeaderPart part, bool onCaption)
 {
-    if (part == HeaderPart::sign) m_session.apply(signTurned(m_session.base()), tr("Turn the sign of work and heat"));
-    else if (part == HeaderPart::title && !onCaption) editTitle();
-    else emit partRequested(part);
+    if (part == HeaderPart::sign)
+        m_session.apply(signTurned(m_session.base()), tr("Turn the sign of work and heat"));
+    else if (part == HeaderPart::title && !onCaption)
+        editTitle();
+    else
+        emit partRequested(part);
 }
 
 void HeaderBar::editTitle()

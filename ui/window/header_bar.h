@@ -1,6 +1,6 @@
 #pragma once
-// The header: the design's title, gas, surroundings, sign, units and rate, each to click and edit in place; the state of the
-// document; the one primary action.
+// The header: the design's title, gas, surroundings, sign, units and rate, each to click and edit in place; the state
+// of the document; the one primary action.
 
 #include "ui/window/header_field.h"
 #include "ui/window/header_forms.h"

@@ -69,8 +69,10 @@ void HeaderField::paintEvent(QPaintEvent *)
     }
     const QFont font = valueFace(m_bold);
     painter.setPen(m_look.ink);
-    if (textWidth(m_value, font) <= width() - left) drawText(painter, {left, 33.5}, m_value, font);
-    else drawText(painter, {left, 33.5}, elided(m_value.unstyled(), font, width() - left), font);
+    if (textWidth(m_value, font) <= width() - left)
+        drawText(painter, {left, 33.5}, m_value, font);
+    else
+        drawText(painter, {left, 33.5}, elided(m_value.unstyled(), font, width() - left), font);
     if (!m_hovered && !hasFocus()) return;
     painter.setPen(QPen(m_look.accent, hasFocus() ? 2.0 : 1.0));
     painter.drawLine(QPointF(0, 39), QPointF(std::min<double>(width(), textWidth(m_value, font) + left), 39));
@@ -86,7 +88,8 @@ void HeaderField::keyPressEvent(QKeyEvent *event)
 {
     if (event->key() == Qt::Key_Return || event->key() == Qt::Key_Enter || event->key() == Qt::Key_Space)
         emit clicked(false);
-    else QWidget::keyPressEvent(event);
+    else
+        QWidget::keyPressEvent(event);
 }
 
 void HeaderField::enterEvent(QEnterEvent *)

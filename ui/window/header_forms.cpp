@@ -24,8 +24,8 @@ QString say(const char *text)
 
 const QString dot = QStringLiteral(" · ");
 
-FormField valueField(const char *id, const char *caption, FieldContent content, const char *pointer, const Design &design,
-                     Quantity quantity = Quantity::number)
+FormField valueField(const char *id, const char *caption, FieldContent content, const char *pointer,
+                     const Design &design, Quantity quantity = Quantity::number)
 {
     FormField field{.id = id, .caption = say(caption)};
     field.content = content;
@@ -98,15 +98,18 @@ std::vector<FormField> gasForm(const Design &design)
     model.chosen = typedAt(design.json, "/gas/model").toStdString();
     std::vector<FormField> form{model};
     if (model.chosen == "perfect") {
-        form.push_back(valueField("heat_capacity_ratio", "γ", FieldContent::number, "/gas/heat_capacity_ratio", design));
+        form.push_back(
+            valueField("heat_capacity_ratio", "γ", FieldContent::number, "/gas/heat_capacity_ratio", design));
         form.push_back(valueField("molar_mass", QT_TRANSLATE_NOOP("Header", "molar mass"), FieldContent::quantity,
                                   "/gas/molar_mass", design, Quantity::molarMass));
-        form.push_back(valueField("name", QT_TRANSLATE_NOOP("Header", "called"), FieldContent::text, "/gas/name", design));
+        form.push_back(
+            valueField("name", QT_TRANSLATE_NOOP("Header", "called"), FieldContent::text, "/gas/name", design));
         return form;
     }
     const std::string key = compositionKey(design);
-    FormField made = valueField("composition", key == "composition" ? QT_TRANSLATE_NOOP("Header", "made of")
-                                                                    : QT_TRANSLATE_NOOP("Header", "by mass"),
+    FormField made = valueField("composition",
+                                key == "composition" ? QT_TRANSLATE_NOOP("Header", "made of")
+                                                     : QT_TRANSLATE_NOOP("Header", "by mass"),
                                 FieldContent::text, "", design);
     made.pointer = "/gas/" + key;
     if (const Json *composition = valueAt(design.json, made.pointer)) made.value = compositionText(*composition);
@@ -143,18 +146,19 @@ RichText surroundingsWords(const Snapshot &snapshot)
 
 std::vector<FormField> surroundingsForm(const Snapshot &snapshot)
 {
-    std::vector<FormField> form{
-        valueField("pressure", QT_TRANSLATE_NOOP("Header", "pressure"), FieldContent::quantity, "/surroundings/pressure",
-                   snapshot.design, Quantity::pressure),
-        valueField("temperature", QT_TRANSLATE_NOOP("Header", "temperature"), FieldContent::quantity,
-                   "/surroundings/temperature", snapshot.design, Quantity::temperature)};
+    std::vector<FormField> form{valueField("pressure", QT_TRANSLATE_NOOP("Header", "pressure"), FieldContent::quantity,
+                                           "/surroundings/pressure", snapshot.design, Quantity::pressure),
+                                valueField("temperature", QT_TRANSLATE_NOOP("Header", "temperature"),
+                                           FieldContent::quantity, "/surroundings/temperature", snapshot.design,
+                                           Quantity::temperature)};
     form[0].placeholder = QStringLiteral("101.325 kPa");
     form[1].placeholder = QStringLiteral("25 °C");
     for (FormField &field : form) field.optional = true;
     return form;
 }
 
-FormField unitField(const char *id, const char *caption, const std::string &now, std::initializer_list<const char *> offered)
+FormField unitField(const char *id, const char *caption, const std::string &now,
+                    std::initializer_list<const char *> offered)
 {
     FormField field{.id = id, .caption = say(caption)};
     bool known = now.empty();
@@ -235,7 +239,8 @@ HeaderEdit headerEntered(HeaderPart part, const Design &design, const FormField 
     if (part == HeaderPart::gas && field.id == "composition") {
         const auto composition = compositionFrom(text);
         if (!composition)
-            return {design, say("Write each gas with its fraction: nitrogen 0.78, oxygen 0.22; or one name alone: air.")};
+            return {design,
+                    say("Write each gas with its fraction: nitrogen 0.78, oxygen 0.22; or one name alone: air.")};
         return {withValue(design, field.pointer, *composition), {}};
     }
     if (field.content == FieldContent::number) return {withValue(design, field.pointer, numberAsTyped(text)), {}};

@@ -95,7 +95,8 @@ void HeaderPopover::choose(const QString &id, const QString &key)
     const FormField field = *m_form->field(id);
     if (field.chosen == key.toStdString()) return;
     m_session.cancelPreview();
-    m_session.apply(headerChosen(m_part, m_session.base(), field, key.toStdString()), tr("Change %1").arg(field.caption));
+    m_session.apply(headerChosen(m_part, m_session.base(), field, key.toStdString()),
+                    tr("Change %1").arg(field.caption));
 }
 
 void HeaderPopover::type(const QString &id, const QString &text)
@@ -134,9 +135,12 @@ void HeaderPopover::paintEvent(QPaintEvent *)
 
 void HeaderPopover::keyPressEvent(QKeyEvent *event)
 {
-    if (event->key() == Qt::Key_Escape) hide();
-    else if (event->key() == Qt::Key_Return || event->key() == Qt::Key_Enter) finish();
-    else QWidget::keyPressEvent(event);
+    if (event->key() == Qt::Key_Escape)
+        hide();
+    else if (event->key() == Qt::Key_Return || event->key() == Qt::Key_Enter)
+        finish();
+    else
+        QWidget::keyPressEvent(event);
 }
 
 bool HeaderPopover::eventFilter(QObject *watched, QEvent *event)
@@ -146,8 +150,14 @@ bool HeaderPopover::eventFilter(QObject *watched, QEvent *event)
     return false;
 }
 
-void HeaderPopover::showEvent(QShowEvent *) { qApp->installEventFilter(this); }
+void HeaderPopover::showEvent(QShowEvent *)
+{
+    qApp->installEventFilter(this);
+}
 
-void HeaderPopover::hideEvent(QHideEvent *) { qApp->removeEventFilter(this); }
+void HeaderPopover::hideEvent(QHideEvent *)
+{
+    qApp->removeEventFilter(this);
+}
 
 } // namespace quasistat::ui

@@ -80,8 +80,10 @@ void NoticeBar::paintEvent(QPaintEvent *)
 
 void NoticeBar::keyPressEvent(QKeyEvent *event)
 {
-    if (event->key() == Qt::Key_Escape) close();
-    else QWidget::keyPressEvent(event);
+    if (event->key() == Qt::Key_Escape)
+        close();
+    else
+        QWidget::keyPressEvent(event);
 }
 
 } // namespace quasistat::ui

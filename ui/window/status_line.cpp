@@ -50,7 +50,8 @@ QString StatusLine::auditWords() const
     const auto &evaluation = m_session.now().evaluation;
     if (!evaluation || evaluation->path.segments.empty()) return {};
     const auto &segments = evaluation->path.segments;
-    const auto agree = std::count_if(segments.begin(), segments.end(), [](const auto &segment) { return segment.audit.ok; });
+    const auto agree =
+        std::count_if(segments.begin(), segments.end(), [](const auto &segment) { return segment.audit.ok; });
     return tr("audit: %1 of %2 agree").arg(agree).arg(segments.size());
 }
 
@@ -59,7 +60,8 @@ QString StatusLine::envelopeWords() const
     const auto &evaluation = m_session.now().evaluation;
     if (!evaluation || evaluation->verdicts.empty()) return {};
     const auto &verdicts = evaluation->verdicts;
-    const auto broken = std::count_if(verdicts.begin(), verdicts.end(), [](const auto &verdict) { return !verdict.ok; });
+    const auto broken =
+        std::count_if(verdicts.begin(), verdicts.end(), [](const auto &verdict) { return !verdict.ok; });
     return broken == 0 ? tr("envelope: holds") : tr("envelope: %1 of %2 exceeded").arg(broken).arg(verdicts.size());
 }
 

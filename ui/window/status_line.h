@@ -1,8 +1,8 @@
 #pragma once
 // The lowest line of the window: what was just said, and the standing of audit and envelope.
 
-#include "ui/session/session.h"
 #include "ui/look/palette.h"
+#include "ui/session/session.h"
 
 #include <QTimer>
 #include <QWidget>

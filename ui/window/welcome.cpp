@@ -56,10 +56,12 @@ void Welcome::createViews()
     auto *column = new QVBoxLayout(page);
     column->setContentsMargins(96, 56, 64, 40);
     column->setSpacing(10);
-    column->addWidget(words(tr("Take a charge of gas from one state to another"), face(24, QFont::DemiBold), false, page));
-    column->addWidget(words(tr("Chain segments on the p–V plane; read work, heat and lost work of each, checked two ways, and "
-                               "hand on a report that can be verified."),
-                            bodyFace(), true, page));
+    column->addWidget(
+        words(tr("Take a charge of gas from one state to another"), face(24, QFont::DemiBold), false, page));
+    column->addWidget(
+        words(tr("Chain segments on the p–V plane; read work, heat and lost work of each, checked two ways, and "
+                 "hand on a report that can be verified."),
+              bodyFace(), true, page));
     column->addSpacing(10);
 
     auto *starts = new QHBoxLayout;
@@ -119,8 +121,8 @@ void Welcome::setRecentFiles(const QStringList &files)
     rows->addWidget(words(tr("Recent designs"), titleFace(), false, m_recent));
     for (const QString &file : files.mid(0, 4)) {
         const QFileInfo info(file);
-        auto *made = button(tr("%1 in %2").arg(info.fileName(), info.absolutePath()), QStringLiteral("recent.") + info.fileName(),
-                            false, m_recent);
+        auto *made = button(tr("%1 in %2").arg(info.fileName(), info.absolutePath()),
+                            QStringLiteral("recent.") + info.fileName(), false, m_recent);
         made->setProperty("role", QStringLiteral("quiet"));
         connect(made, &QPushButton::clicked, this, [this, file] { emit fileChosen(file); });
         rows->addWidget(made);
