@@ -94,7 +94,7 @@ void MainWindow::enableActions()
     action(ActionId::redo)->setEnabled(stack.canRedo());
     action(ActionId::undo)->setText(stack.canUndo() ? tr("Undo: %1").arg(stack.undoText()) : tr("Undo"));
     action(ActionId::redo)->setText(stack.canRedo() ? tr("Redo: %1").arg(stack.redoText()) : tr("Redo"));
-    const bool report = design && m_reportWriter && m_session.now().evaluation;
+    const bool report = design && m_session.now().evaluation;
     for (const ActionId id : {ActionId::reportA4, ActionId::reportLetter}) action(id)->setEnabled(report);
     m_header->report().setEnabled(report);
 

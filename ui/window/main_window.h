@@ -2,6 +2,7 @@
 // The one window of one design: header, canvas, strip, ledger, status line, and what stands over them.
 
 #include "ui/ledger/ledger_panel.h"
+#include "ui/report/page.h"
 #include "ui/session/recovery.h"
 #include "ui/session/settings.h"
 #include "ui/window/action_table.h"
@@ -13,7 +14,6 @@
 #include "ui/window/workspace.h"
 
 #include <QMenu>
-#include <QPageSize>
 
 #include <functional>
 
@@ -24,20 +24,15 @@ class MainWindow : public QWidget
 {
     Q_OBJECT
 public:
-    /// Writes the report of what the session shows to a file; answers with a sentence if it could not.
-    using ReportWriter =
-        std::function<QString(const Snapshot &snapshot, const QString &path, QPageSize::PageSizeId paper)>;
-
     explicit MainWindow(const QString &recoveryFolder = Recovery::defaultFolder(), QWidget *parent = nullptr);
     ~MainWindow() override;
-
-    /// Without one there is no report to ask for.
-    void setReportWriter(ReportWriter writer);
 
     /// Opens the file; a sentence says why if it cannot. Unsaved changes are asked about first.
     void openFile(const QString &path);
     /// Saves to `path`. False if the disk refuses; the bar then says why and the design stays changed.
     bool saveTo(const QString &path);
+    /// Writes the report as a PDF. False if it cannot be made or written; the bar then says why.
+    bool writeReport(const QString &path, PageSize paper);
     void setScheme(const QString &scheme); ///< "light", "dark" or "system"
 
     [[nodiscard]] Session &session() { return m_session; }
@@ -77,7 +72,7 @@ private:
     void save(std::function<void()> then = {});
     void saveAs(std::function<void()> then = {});
     void askAndDo(std::function<void()> then); ///< at once, or after the answer on unsaved changes
-    void writeReport(QPageSize::PageSizeId paper);
+    void chooseReport(PageSize paper);
     void keepRecovery();
     void offerRecovery();
 
@@ -93,7 +88,6 @@ private:
     LedgerPanel *m_ledger = nullptr;
     StatusLine *m_status = nullptr;
     Welcome *m_welcome = nullptr;
-    ReportWriter m_reportWriter;
     QTimer m_autosave;
     bool m_mayClose = false;
 };

@@ -44,8 +44,8 @@ void MainWindow::connectFileActions()
             m_welcome->setRecentFiles(m_settings.value(settings::recentFiles));
         });
     });
-    on(ActionId::reportA4, [this] { writeReport(QPageSize::A4); });
-    on(ActionId::reportLetter, [this] { writeReport(QPageSize::Letter); });
+    on(ActionId::reportA4, [this] { chooseReport(PageSize::a4); });
+    on(ActionId::reportLetter, [this] { chooseReport(PageSize::letter); });
     on(ActionId::quit, [this] { close(); });
 }
 

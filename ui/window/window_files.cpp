@@ -1,6 +1,7 @@
 // Opening, saving, asking and keeping: what the window does with files.
 
 #include "core/document/file.h"
+#include "ui/report/report.h"
 #include "ui/session/design_reading.h"
 #include "ui/session/sentences.h"
 #include "ui/window/main_window.h"
@@ -126,9 +127,8 @@ void MainWindow::askAndDo(std::function<void()> then)
                    {QStringLiteral("noticeCancel"), tr("Cancel"), [] {}}});
 }
 
-void MainWindow::writeReport(QPageSize::PageSizeId paper)
+void MainWindow::chooseReport(PageSize paper)
 {
-    if (!m_reportWriter) return;
     auto *chooser =
         new QFileDialog(this, tr("Save the report"), m_settings.value(settings::lastFolder), tr("PDF (*.pdf)"));
     chooser->setObjectName(QStringLiteral("reportChooser"));
@@ -138,20 +138,31 @@ void MainWindow::writeReport(QPageSize::PageSizeId paper)
     const QString name =
         m_session.filePath().isEmpty() ? tr("report") : QFileInfo(m_session.filePath()).completeBaseName();
     chooser->selectFile(name + QStringLiteral(".pdf"));
-    connect(chooser, &QFileDialog::fileSelected, this, [this, paper](const QString &path) {
-        const QString fault = m_reportWriter(m_session.now(), path, paper);
-        if (fault.isEmpty())
-            m_status->say(tr("Report written to %1.").arg(path));
-        else
-            m_notice->say(tr("The report is not written. %1").arg(fault));
-    });
+    connect(chooser, &QFileDialog::fileSelected, this,
+            [this, paper](const QString &path) { writeReport(path, paper); });
     chooser->open();
 }
 
-void MainWindow::setReportWriter(ReportWriter writer)
+bool MainWindow::writeReport(const QString &path, PageSize paper)
 {
-    m_reportWriter = std::move(writer);
-    enableActions();
+    m_session.cancelPreview();
+    const QString design = QFileInfo(m_session.filePath()).fileName();
+    const ReportOrder order{.pageSize = paper,
+                            .programVersion = QCoreApplication::applicationVersion(),
+                            .fileName = design.isEmpty() ? QStringLiteral("design.qpath") : design};
+    const Outcome<QByteArray> pdf = report(m_session.now(), order);
+    if (!pdf) {
+        m_notice->say(tr("There is no report yet. %1").arg(sentenceOf(pdf.failure(), m_session.now().units)));
+        return false;
+    }
+    const auto bytes = std::string_view(pdf->constData(), static_cast<std::size_t>(pdf->size()));
+    const auto written = document::writeWhole(path.toStdString(), bytes);
+    if (!written) {
+        m_notice->say(tr("The report is not written. %1").arg(sentenceOf(written.failure(), m_session.now().units)));
+        return false;
+    }
+    m_status->say(tr("Report written to %1.").arg(path));
+    return true;
 }
 
 void MainWindow::keepRecovery()
