@@ -2,6 +2,9 @@
 
 #include "app/command_line/streams.h"
 #include "app/command_line/subcommands.h"
+#include "ui/window/run_window.h"
+
+#include <QApplication>
 
 #include <exception>
 #include <string>
@@ -17,11 +20,25 @@ int exitCode(app::ExitStatus status)
     return static_cast<int>(status);
 }
 
-int run(const std::vector<std::string> &words)
+int window(int argc, char **argv)
 {
-    if (words.empty() || !app::isCommand(words.front()))
-        return exitCode(app::wrongUsage({.text = "the window is not in this version", .arguments = {}}, ""));
-    return exitCode(app::commandLine(words));
+    QApplication application(argc, argv);
+    QApplication::setApplicationName(QStringLiteral("quasistat"));
+    QApplication::setApplicationDisplayName(QStringLiteral("Quasistat"));
+    QApplication::setOrganizationName(QStringLiteral("quasistat"));
+    QApplication::setApplicationVersion(QStringLiteral(QUASISTAT_VERSION));
+    const QStringList words = QApplication::arguments(); // without those that Qt takes for itself
+    if (words.size() > 2)
+        return exitCode(app::wrongUsage(
+            {.text = "the window opens one file, not {0}", .arguments = {std::to_string(words.size() - 1)}}, ""));
+    return ui::runWindow(application, words.value(1));
+}
+
+int run(int argc, char **argv)
+{
+    const std::vector<std::string> words{argv + 1, argv + argc};
+    if (!words.empty() && app::isCommand(words.front())) return exitCode(app::commandLine(words));
+    return window(argc, argv);
 }
 
 } // namespace
@@ -29,7 +46,7 @@ int run(const std::vector<std::string> &words)
 int main(int argc, char **argv)
 {
     try {
-        return run({argv + 1, argv + argc});
+        return run(argc, argv);
     } catch (const std::exception &error) {
         // Our own functions do not throw; memory may still run out.
         app::complain({.text = "{0}", .arguments = {std::string(error.what())}});

@@ -20,13 +20,16 @@ constexpr std::array computeOptions{
     OptionRule{"--csv", "", "", true}, OptionRule{"--xlsx", "OUT", "", true}};
 constexpr std::array checkOptions{json, set};
 constexpr std::array gasesOptions{json};
+constexpr OptionRule output{"-o", "OUT", "the file to write"};
+constexpr std::array reportOptions{output, OptionRule{"--paper", "SIZE", "A4 (default) or Letter"}, json, set};
+constexpr std::array drawOptions{output, OptionRule{"--plane", "PLANE", "p-v"}, json, set};
 
 constexpr std::array table{
     Subcommand{"compute", "FILE", "states, work and heat of every segment, totals", computeOptions, compute},
     Subcommand{"check", "FILE", "audit and envelope, one line per finding", checkOptions, check},
     Subcommand{"gases", "", "gas models and gases with their ranges and sources", gasesOptions, gases},
-    Subcommand{"report", "FILE -o OUT", "the report", {}, nullptr},
-    Subcommand{"draw", "FILE -o OUT", "one diagram", {}, nullptr},
+    Subcommand{"report", "FILE -o OUT", "the report as a PDF, the design attached", reportOptions, report},
+    Subcommand{"draw", "FILE -o OUT", "the p–V diagram as .svg, .pdf or .png", drawOptions, draw},
     Subcommand{"sweep", "FILE", "", {}, nullptr},
     Subcommand{"solve", "FILE", "", {}, nullptr},
     Subcommand{"uncertainty", "FILE", "", {}, nullptr},

@@ -30,5 +30,7 @@ struct Subcommand {
 [[nodiscard]] ExitStatus compute(const Options &options);
 [[nodiscard]] ExitStatus check(const Options &options);
 [[nodiscard]] ExitStatus gases(const Options &options);
+[[nodiscard]] ExitStatus report(const Options &options);
+[[nodiscard]] ExitStatus draw(const Options &options);
 
 } // namespace quasistat::app

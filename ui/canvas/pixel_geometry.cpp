@@ -110,15 +110,35 @@ QPolygonF thinned(const QPolygonF &line)
 {
     constexpr double tolerance = 0.1;
     if (line.size() < 3) return line;
+    // From the last point kept, the directions that pass every later point within the tolerance: a sector that narrows
+    // until the next point lies outside it. Linear in the number of points.
     QPolygonF result{line.first()};
     qsizetype from = 0;
-    for (qsizetype to = 2; to < line.size(); ++to) {
-        const QPolygonF chord{line.at(from), line.at(to)};
-        bool isNear = true;
-        for (qsizetype i = from + 1; i < to && isNear; ++i) isNear = distanceTo(chord, line.at(i)) <= tolerance;
-        if (isNear) continue;
-        from = to - 1;
-        result.append(line.at(from));
+    double middle = 0.0;
+    double lowest = -std::numbers::pi;
+    double highest = std::numbers::pi;
+    bool isOpen = true;
+    for (qsizetype i = 1; i < line.size(); ++i) {
+        QPointF step = line.at(i) - line.at(from);
+        if (norm(step) <= tolerance) continue;
+        double turn = isOpen ? 0.0 : std::remainder(std::atan2(step.y(), step.x()) - middle, 2.0 * std::numbers::pi);
+        if (!isOpen && (turn < lowest || turn > highest)) {
+            from = i - 1;
+            result.append(line.at(from));
+            step = line.at(i) - line.at(from);
+            turn = 0.0;
+            isOpen = true;
+        }
+        const double reach = norm(step);
+        if (isOpen) {
+            middle = std::atan2(step.y(), step.x());
+            lowest = -std::numbers::pi;
+            highest = std::numbers::pi;
+            isOpen = false;
+        }
+        const double half = reach > tolerance ? std::asin(tolerance / reach) : std::numbers::pi;
+        lowest = std::max(lowest, turn - half);
+        highest = std::min(highest, turn + half);
     }
     result.append(line.last());
     return result;

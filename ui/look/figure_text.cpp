@@ -131,8 +131,12 @@ void drawText(QPainter &painter, QPointF anchor, const RichText &text, const QFo
             continue;
         }
         painter.setFont(used);
-        anchor.rx() += eachPiece(
-            run.text, used, [&](double x, const QString &piece) { painter.drawText(at + QPointF(x, 0.0), piece); });
+        // In an SVG file a run stays one piece of text that can be searched and edited; its viewer sets the digits.
+        const bool isSvg = painter.paintEngine()->type() == QPaintEngine::SVG;
+        if (isSvg) painter.drawText(at, run.text);
+        anchor.rx() += eachPiece(run.text, used, [&](double x, const QString &piece) {
+            if (!isSvg) painter.drawText(at + QPointF(x, 0.0), piece);
+        });
     }
 }
 

@@ -21,18 +21,17 @@ bool isGeneric(const QString &family)
 
 } // namespace
 
-QString interfaceFamily()
+QStringList interfaceFamilies()
 {
     const QString system = QFontDatabase::systemFont(QFontDatabase::GeneralFont).family();
-    if (!isGeneric(system)) return system;
-    for (const auto &preferred : {QStringLiteral("Inter"), QStringLiteral("DejaVu Sans")})
-        if (QFontDatabase::hasFamily(preferred)) return preferred;
-    return system;
+    if (!isGeneric(system)) return {system};
+    return {QStringLiteral("Inter"), QStringLiteral("DejaVu Sans"), system};
 }
 
 QFont face(double pixels, QFont::Weight weight)
 {
-    QFont result(interfaceFamily());
+    QFont result;
+    result.setFamilies(interfaceFamilies()); // the first that is installed
     result.setPixelSize(static_cast<int>(std::lround(pixels)));
     result.setWeight(weight);
     // Fractional advances: a label keeps its width on screen, in print and at any zoom.

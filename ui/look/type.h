@@ -2,14 +2,14 @@
 // The faces and sizes of type: few, and the same everywhere.
 
 #include <QFont>
-#include <QString>
+#include <QStringList>
 
 namespace quasistat::ui
 {
 
-/// The platform's interface face; where the platform names only a generic one: Inter if installed, then DejaVu Sans.
-/// Needs a QGuiApplication.
-[[nodiscard]] QString interfaceFamily();
+/// The platform's interface face; where the platform names only a generic one: Inter, then DejaVu Sans. The first that
+/// is installed is used. Needs a QGuiApplication.
+[[nodiscard]] QStringList interfaceFamilies();
 
 /// The interface face at `pixels`, a device-independent size.
 [[nodiscard]] QFont face(double pixels, QFont::Weight weight = QFont::Normal);
