@@ -2,6 +2,7 @@
 
 #include "core/units/display.h"
 #include "core/units/measure.h"
+#include "ui/session/sentences.h"
 
 #include <QCoreApplication>
 #include <QRegularExpression>
@@ -11,11 +12,6 @@ namespace quasistat::ui
 
 namespace
 {
-
-QString sentenceOf(const Failure &failure)
-{
-    return QString::fromStdString(units::sentence(failure.message, units::DisplayUnits{}));
-}
 
 bool isReference(const QString &text)
 {
@@ -37,11 +33,11 @@ QString complaintOf(const FormField &field, const QString &text)
         [[fallthrough]];
     case FieldContent::quantity: {
         const auto measure = units::measured(trimmed.toStdString(), field.quantity);
-        return measure ? QString() : sentenceOf(measure.failure());
+        return measure ? QString() : sentenceOf(measure.failure(), units::DisplayUnits{});
     }
     case FieldContent::number: {
         const auto number = units::plainNumber(trimmed.toStdString());
-        return number ? QString() : sentenceOf(number.failure());
+        return number ? QString() : sentenceOf(number.failure(), units::DisplayUnits{});
     }
     case FieldContent::count: {
         bool whole = false;

@@ -18,7 +18,7 @@ namespace
 
 constexpr int fieldHeight = 28;
 constexpr int lineGap = 4; // 32 px from line to line
-constexpr int captionWidth = 60;
+constexpr int captionWidth = 44;
 
 bool sameShape(const FormField &a, const FormField &b)
 {
@@ -67,8 +67,8 @@ void FormView::build(const std::vector<FormField> &fields, int columns)
     }
     for (int column = 0; column < columns; ++column) {
         grid->setColumnMinimumWidth(4 * column, captionWidth);
-        grid->setColumnStretch(4 * column + 1, 11);
-        grid->setColumnStretch(4 * column + 2, 9);
+        grid->setColumnStretch(4 * column + 1, 7);
+        grid->setColumnStretch(4 * column + 2, 5);
         if (column + 1 < columns) grid->setColumnMinimumWidth(4 * column + 3, 8);
     }
     for (const Line &line : m_lines) {

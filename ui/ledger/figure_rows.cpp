@@ -121,7 +121,7 @@ void addMachineFigures(FigureList &list, const Snapshot &snapshot)
     list.add("carnot_ratio", say("ratio to the Carnot bound"), totals.carnotRatio, Quantity::number);
     if (!totals.power) return;
     const QString rate = asPrinted(typedAt(snapshot.design.json, "/rate"));
-    list.add("power", (*totals.power < 0 ? say("power taken, at %1") : say("power delivered, at %1")).arg(rate),
+    list.add("power", (*totals.power < 0 ? say("power taken, at %1") : say("power given, at %1")).arg(rate),
              std::abs(*totals.power), Quantity::power);
 }
 

@@ -43,7 +43,11 @@ const LimitFacts &facts(LimitQuantity quantity)
 
 QString sentenceOf(const Message &message, const units::DisplayUnits &units)
 {
-    return QString::fromStdString(units::sentence(message, units));
+    QString text = QString::fromStdString(units::sentence(message, units));
+    if (text.isEmpty()) return text;
+    text[0] = text[0].toUpper();
+    static const QString ends = QStringLiteral(".!?…");
+    return ends.contains(text.back()) ? text : text + QLatin1Char('.');
 }
 
 QString sentenceOf(const Failure &failure, const units::DisplayUnits &units)

@@ -2,6 +2,7 @@
 
 #include "ui/session/design_command.h"
 #include "ui/session/design_reading.h"
+#include "ui/session/sentences.h"
 
 namespace quasistat::ui
 {
@@ -63,8 +64,7 @@ void Session::apply(const document::Edited &edited, const QString &text)
 {
     apply(edited.design, text);
     QStringList sentences;
-    for (const Warning &remark : edited.remarks)
-        sentences << QString::fromStdString(units::sentence(remark.message, m_snapshot->units));
+    for (const Warning &remark : edited.remarks) sentences << sentenceOf(remark.message, m_snapshot->units);
     if (!sentences.isEmpty()) emit remarked(sentences.join(QLatin1Char(' ')));
 }
 

@@ -186,9 +186,8 @@ std::vector<FormField> unitsForm(const units::DisplayUnits &units)
 RichText unitsWords(const units::DisplayUnits &units)
 {
     QStringList names;
-    for (const std::string *unit : {&units.pressure, &units.volume, &units.temperature, &units.energy})
-        if (!unit->empty()) names << QString::fromStdString(*unit);
-    if (units.energy.empty()) names << QStringLiteral("J");
+    for (const Quantity quantity : {Quantity::pressure, Quantity::volume, Quantity::temperature, Quantity::energy})
+        names << QString::fromStdString(units::scaleFor(quantity, {}, units).unit);
     return RichText::plain(names.join(dot));
 }
 

@@ -143,6 +143,13 @@ void HeaderPopover::keyPressEvent(QKeyEvent *event)
         QWidget::keyPressEvent(event);
 }
 
+bool HeaderPopover::event(QEvent *event)
+{
+    // A sentence under a field has come or gone.
+    if (event->type() == QEvent::LayoutRequest && isVisible()) fit();
+    return QWidget::event(event);
+}
+
 bool HeaderPopover::eventFilter(QObject *watched, QEvent *event)
 {
     if (event->type() == QEvent::MouseButtonPress)
