@@ -62,7 +62,7 @@ public:
     std::string_view model() const override { return "perfect"; }
     std::string_view source() const override
     {
-        return "p v = R T with constant c_p = γ R/(γ − 1); R exact (SI Brochure, 9th ed., 2019)";
+        return "p v = R T with constant heat capacities; R exact: SI Brochure, 9th ed. (2019)";
     }
     const std::string &name() const override { return m_name; }
 

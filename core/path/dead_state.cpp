@@ -26,7 +26,8 @@ double availableWork(const gas::State &state, const gas::MolarState &dead, const
 
 std::optional<StoredEnergy> storedEnergy(const gas::State &state, double surroundingsPressure)
 {
-    if (state.isEvacuated() || state.pressure() < surroundingsPressure) return std::nullopt;
+    constexpr double rounding = 1e-12; // a charge at p₀ itself has a stored energy: none
+    if (state.isEvacuated() || state.pressure() < surroundingsPressure * (1.0 - rounding)) return std::nullopt;
     const gas::MolarState &s = state.molar();
     const auto released =
         gas::stateFrom(state.gas(), {Property::entropy, s.entropy}, {Property::pressure, surroundingsPressure}, &s);

@@ -5,8 +5,10 @@
 
 #include <benchmark/benchmark.h>
 
-namespace quasistat::path {
-namespace {
+namespace quasistat::path
+{
+namespace
+{
 
 PathInput fiftySegments(gas::GasPtr gas)
 {
@@ -31,7 +33,9 @@ void recompute(benchmark::State &state, const gas::GasPtr &gas)
     }
 }
 
-BENCHMARK_CAPTURE(recompute, path_recompute_perfect_gas, test::perfect())->Unit(benchmark::kMillisecond)->Repetitions(9);
+BENCHMARK_CAPTURE(recompute, path_recompute_perfect_gas, test::perfect())
+    ->Unit(benchmark::kMillisecond)
+    ->Repetitions(9);
 BENCHMARK_CAPTURE(recompute, path_recompute_ideal_air, test::idealAir())->Unit(benchmark::kMillisecond)->Repetitions(9);
 
 } // namespace

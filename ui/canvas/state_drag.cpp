@@ -1,5 +1,7 @@
 #include "ui/canvas/state_drag.h"
 
+#include "ui/session/design_reading.h"
+
 #include "core/path/slide.h"
 #include "ui/canvas/typed_end.h"
 
@@ -73,10 +75,8 @@ std::vector<Warning> remarksOn(std::size_t index, const path::Segment &segment, 
 const Json &typedBefore(const Json &segment, EndKey key)
 {
     static const Json nothing;
-    const auto end = segment.find("end");
-    if (end == segment.end() || !end->is_object()) return nothing;
-    const auto value = end->find(std::string(path::keyOf(key)));
-    return value == end->end() ? nothing : *value;
+    const Json *value = valueAt(segment, "/end/" + std::string(path::keyOf(key)));
+    return value ? *value : nothing;
 }
 
 // A level against constant external pressure ends at balance; pulled up to there or beyond, it says so.

@@ -53,7 +53,7 @@ QString complaintOf(const FormField &field, const QString &text)
     return {};
 }
 
-QString printed(const QString &text)
+QString asPrinted(const QString &text)
 {
     static const QRegularExpression gap(QStringLiteral("(?<=[0-9.])\\s+(?=[^0-9\\s±+(])"));
     QString result = text.trimmed();

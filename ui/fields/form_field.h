@@ -46,6 +46,6 @@ struct FormField {
 [[nodiscard]] QString complaintOf(const FormField &field, const QString &text);
 
 /// `text` as it is printed: a narrow space between number and unit, U+2212 for a leading minus.
-[[nodiscard]] QString printed(const QString &text);
+[[nodiscard]] QString asPrinted(const QString &text);
 
 } // namespace quasistat::ui

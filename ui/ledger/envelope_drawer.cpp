@@ -237,7 +237,7 @@ void EnvelopeDrawer::choose(int limit, const QString &key)
 
 void EnvelopeDrawer::enter(int limit, const QString &id, const QString &text, bool previewOnly)
 {
-    const std::string pointer = pointerOf(limit, "/" + id.toStdString());
+    const std::string pointer = pointerOf(limit, std::string(1, '/').append(id.toStdString()));
     const bool number = form(limit)->field(id)->content == FieldContent::number && !text.trimmed().isEmpty();
     const document::Design &base = m_session.base().design;
     const document::Design changed =

@@ -120,7 +120,7 @@ void addMachineFigures(FigureList &list, const Snapshot &snapshot)
     list.add("cop_cooling", say("coefficient of performance, cooling"), totals.copCooling, Quantity::number);
     list.add("carnot_ratio", say("ratio to the Carnot bound"), totals.carnotRatio, Quantity::number);
     if (!totals.power) return;
-    const QString rate = printed(typedAt(snapshot.design.json, "/rate"));
+    const QString rate = asPrinted(typedAt(snapshot.design.json, "/rate"));
     list.add("power", (*totals.power < 0 ? say("power taken, at %1") : say("power delivered, at %1")).arg(rate),
              std::abs(*totals.power), Quantity::power);
 }

@@ -1,8 +1,11 @@
 // What the path comes to, and how far its figures were checked.
 
+#include "ui/canvas/limit_text.h"
+#include "ui/ledger/ledger_rows.h"
 #include "ui/report/prose.h"
 #include "ui/report/sections.h"
 #include "ui/report/table.h"
+#include "ui/session/design_reading.h"
 #include "ui/session/sentences.h"
 
 #include <QCoreApplication>
@@ -24,7 +27,7 @@ QString say(const char *text)
 class FigureRows
 {
 public:
-    explicit FigureRows(const units::DisplayUnits &units) : m_units(units) {}
+    FigureRows(const units::DisplayUnits &units, const units::Scale &energy) : m_units(units), m_energy(energy) {}
 
     void add(const QString &words, std::optional<double> value, Quantity quantity)
     {
@@ -37,8 +40,25 @@ public:
 
 private:
     const units::DisplayUnits &m_units;
+    units::Scale m_energy; ///< of the ledger, so that figures agree as printed
     std::vector<TableRow> m_rows;
 };
+
+RichText routeWords(const SegmentResult &segment)
+{
+    if (segment.audit.heatByEntropy)
+        return RichText::marked(say("∫<i>p</i> d<i>V</i> and ∫<i>T</i> d<i>S</i> by quadrature"));
+    return RichText::marked(
+        say("Δ<i>U</i>, Δ<i>S</i> from ∫<i>c<sub>v</sub></i> d<i>T</i> and <i>p</i>(<i>T</i>, <i>v</i>)"));
+}
+
+/// Share of the audit's scale; what is below rounding is said to be.
+QString residualWords(const path::Audit &audit)
+{
+    const double share = audit.scale > 0.0 ? std::abs(audit.firstLawResidual) / audit.scale : 0.0;
+    if (share < 1e-15) return QStringLiteral("< 1e−15");
+    return QString::number(share, 'e', 1).replace(QLatin1Char('-'), QChar(0x2212));
+}
 
 } // namespace
 
@@ -46,7 +66,7 @@ std::vector<Block> pathFiguresSection(const ReportContent &content)
 {
     const path::Totals &totals = content.evaluation.path.totals;
     const units::DisplayUnits &units = content.snapshot.units;
-    FigureRows list(units);
+    FigureRows list(units, accountScale(content.evaluation.path, units));
     const bool takes = totals.netWorkOut < 0.0;
     list.add(takes ? say("net work into the gas") : say("net work by the gas"), std::abs(totals.netWorkOut),
              Quantity::energy);
@@ -64,7 +84,7 @@ std::vector<Block> pathFiguresSection(const ReportContent &content)
     list.add(say("mean effective pressure"), totals.meanEffectivePressure, Quantity::pressure);
     if (totals.power && content.evaluation.input.rate)
         list.add((takes ? say("power taken, at %1") : say("power given, at %1"))
-                     .arg(shownFigure(*content.evaluation.input.rate, Quantity::frequency, units)),
+                     .arg(printed(typedAt(content.snapshot.design.json, "/rate"))),
                  std::abs(*totals.power), Quantity::power);
 
     std::vector<Block> blocks{heading(say("Path"), content.width)};
@@ -77,41 +97,39 @@ std::vector<Block> pathFiguresSection(const ReportContent &content)
 
 std::vector<Block> auditSection(const ReportContent &content)
 {
-    const auto &segments = content.evaluation.path.segments;
-    if (segments.empty()) return {};
-    const units::DisplayUnits &units = content.snapshot.units;
+    const path::PathResult &path = content.evaluation.path;
+    if (path.segments.empty()) return {};
+    const units::Scale scale = accountScale(path, content.snapshot.units);
+    const auto energy = [&](double value) { return TableCell{RichText::plain(figure(value, scale)), {}}; };
     std::vector<TableRow> rows;
-    for (std::size_t k = 0; k < segments.size(); ++k) {
-        const SegmentResult &s = segments[k];
-        const auto energy = [&](double value) {
-            return TableCell{RichText::plain(shownFigure(value, Quantity::energy, units)), {}};
-        };
-        const double share = s.audit.scale > 0.0 ? std::abs(s.audit.firstLawResidual) / s.audit.scale : 0.0;
-        const QString residual = share < 1e-15
-                                     ? QStringLiteral("0")
-                                     : QString::number(share, 'e', 1).replace(QLatin1Char('-'), QChar(0x2212));
-        rows.push_back({{{RichText::plain(QStringLiteral("%1  %2").arg(k + 1).arg(
-                              QString::fromUtf8(path::facts(s.kind).words.data()))),
-                          {}},
-                         {RichText::plain(s.audit.heatByEntropy ? say("∫T dS and ∫p dV by quadrature")
-                                                                : say("ΔU and ΔS by quadrature of c_v and p(T, v)")),
-                          {}},
+    for (std::size_t k = 0; k < path.segments.size(); ++k) {
+        const SegmentResult &s = path.segments[k];
+        const auto words = path::facts(s.kind).words;
+        const QString kind = QString::fromUtf8(words.data(), static_cast<qsizetype>(words.size()));
+        rows.push_back({{{RichText::plain(QStringLiteral("%1  %2").arg(k + 1).arg(kind)), {}},
+                         {routeWords(s), {}},
                          energy(s.deltaInternalEnergy),
                          energy(s.work),
                          energy(s.heat),
-                         {RichText::plain(residual), {}},
+                         {RichText::plain(residualWords(s.audit)), {}},
                          {{}, s.audit.ok ? StateMark::tick : StateMark::cross}}});
     }
-    const std::vector<TableColumn> columns{{RichText::plain(say("segment")), 1.9, Align::left},
-                                           {RichText::plain(say("second route")), 2.4, Align::left},
-                                           {RichText::marked(QStringLiteral("Δ<i>U</i>")), 1.0, Align::right},
-                                           {RichText::marked(QStringLiteral("<i>W</i>")), 1.0, Align::right},
-                                           {RichText::marked(QStringLiteral("<i>Q</i>")), 1.0, Align::right},
-                                           {RichText::plain(say("residual / scale")), 1.0, Align::right},
+    const QString unit = QString::fromStdString(scale.unit);
+    const auto head = [&](const char *symbol) {
+        return RichText::marked(QStringLiteral("%1\u00a0/\u00a0%2").arg(QString::fromUtf8(symbol), unit));
+    };
+    const std::vector<TableColumn> columns{{RichText::plain(say("segment")), 2.2, Align::left},
+                                           {RichText::plain(say("second route")), 2.5, Align::left},
+                                           {head("Δ<i>U</i>"), 1.0, Align::right},
+                                           {head("<i>W</i>"), 1.0, Align::right},
+                                           {head("<i>Q</i>"), 1.0, Align::right},
+                                           {RichText::plain(say("residual")), 1.0, Align::right},
                                            {RichText::plain(say("audit")), 0.5, Align::right}};
     std::vector<Block> blocks{
         heading(say("Audit"), content.width,
-                RichText::plain(say("positive into the gas; agreement within 1e−9 of the largest of |W|, |Q|, |ΔU|")))};
+                RichText::marked(say(
+                    "positive into the gas; residual Δ<i>U</i> − <i>W</i> − <i>Q</i> over the largest of the three, "
+                    "allowed 1e−9")))};
     for (Block &block : table(columns, rows, content.width)) blocks.push_back(std::move(block));
     blocks.push_back(space(10.0));
     return blocks;

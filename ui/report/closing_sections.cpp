@@ -97,8 +97,8 @@ std::vector<Block> envelopeSection(const ReportContent &content)
         const QString terms = limitTerms(limit, units);
         const QString worst = worstFigure(limit, verdict, units);
         // A label may hold any character; only the terms are marked text.
-        RichText words = RichText::plain((verdict.ok ? say("Kept. %1, ") : say("Exceeded. %1, ")).arg(name)) +
-                         RichText::marked(terms);
+        RichText words =
+            RichText::plain((verdict.ok ? say("Kept. %1, ") : say("%1, ")).arg(name)) + RichText::marked(terms);
         if (worst.isEmpty())
             words += RichText::plain(say(": nothing to check on this path."));
         else if (verdict.ok)

@@ -11,7 +11,7 @@ namespace quasistat::ui
 
 std::vector<Block> diagramSection(const ReportContent &content)
 {
-    constexpr double diagramHeight = 436.0 * pageUnitsPerPixel;
+    constexpr double diagramHeight = 404.0 * pageUnitsPerPixel;
     const double width = content.width;
     const Snapshot &snapshot = content.snapshot;
     return {heading(QCoreApplication::translate("Report", "Diagram"), width),

@@ -52,7 +52,7 @@ struct FigureColumn {
 RichText headOf(const FigureColumn &column, const units::Scale &scale)
 {
     const QString unit = QString::fromStdString(scale.unit);
-    return marked(unit.isEmpty() ? column.symbol : QStringLiteral("%1 / %2").arg(column.symbol, unit));
+    return marked(unit.isEmpty() ? column.symbol : QStringLiteral("%1\u00a0/\u00a0%2").arg(column.symbol, unit));
 }
 
 RichText cellOf(const std::optional<double> &value, const units::Scale &scale)
@@ -136,6 +136,7 @@ std::vector<Block> statesSection(const ReportContent &content)
              return s.storedEnergy ? std::optional(s.storedEnergy->real) : std::nullopt;
          })}};
     addFigures(columns, rows, figures, 1.0, content.snapshot.units);
+    columns.back().share = 1.35; // its head is long
     std::vector<Block> blocks{heading(say("States"), content.width)};
     for (Block &block : table(columns, rows, content.width)) blocks.push_back(std::move(block));
     blocks.push_back(space(10.0));
@@ -148,8 +149,8 @@ std::vector<Block> ledgerSection(const ReportContent &content)
     const path::PathResult &path = evaluation.path;
     const units::DisplayUnits &units = content.snapshot.units;
     const double sign = shownSign(units);
-    std::vector<TableColumn> columns{{RichText::plain(say("segment")), 2.7, Align::left},
-                                     {RichText::plain(say("end, as given")), 1.5, Align::left}};
+    std::vector<TableColumn> columns{{RichText::plain(say("segment")), 2.55, Align::left},
+                                     {RichText::plain(say("end, as given")), 1.45, Align::left}};
     std::vector<TableRow> rows;
     for (std::size_t k = 0; k < path.segments.size(); ++k) {
         const document::Json &segment = *segmentAt(content.snapshot.design, static_cast<int>(k));
@@ -178,6 +179,7 @@ std::vector<Block> ledgerSection(const ReportContent &content)
         {say("lost work"), Quantity::energy,
          withTotal([](const SegmentResult &s) { return s.lostWork; }, path.totals.lostWork), energy}};
     addFigures(columns, rows, figures, 0.95, units);
+    columns.back().share = 1.15;
     columns.push_back({RichText::plain(say("audit")), 0.5, Align::right});
     for (std::size_t k = 0; k < path.segments.size(); ++k)
         rows[k].cells.push_back({{}, auditMark(path.segments[k].audit.ok)});
@@ -198,7 +200,7 @@ std::vector<Block> limitsReachedSection(const ReportContent &content)
     const units::DisplayUnits &units = content.snapshot.units;
     const double sign = shownSign(units);
     if (path.segments.empty()) return {};
-    std::vector<TableColumn> columns{{RichText::plain(say("segment")), 1.6, Align::left}};
+    std::vector<TableColumn> columns{{RichText::plain(say("segment")), 1.4, Align::left}};
     std::vector<TableRow> rows;
     for (std::size_t k = 0; k < path.segments.size(); ++k)
         rows.push_back(
@@ -229,6 +231,7 @@ std::vector<Block> limitsReachedSection(const ReportContent &content)
         {QStringLiteral("<i>T</i><sub>max</sub>"), Quantity::temperature,
          valuesOf(path.segments, [](const SegmentResult &s) { return s.extrema.temperature.highest; })}};
     addFigures(columns, rows, figures, 0.9, units);
+    columns[6].share = 1.1; // "shortfall / kJ" on one line
     std::vector<Block> blocks{
         heading(say("Further figures"), content.width,
                 marked(say("<i>W</i><sub>flow</sub> = Δ<i>H</i> − <i>Q</i>; <i>W</i><sub>rod</sub> = <i>W</i> + "

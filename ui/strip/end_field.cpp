@@ -99,8 +99,11 @@ QString typedValue(double value, Quantity quantity, const units::DisplayUnits &u
 {
     constexpr int digits = 5;
     if (quantity == Quantity::number) return QString::number(value, 'g', digits);
-    const auto text =
-        units::typedIn(value, quantity, unitFor(quantity, value, units), units.surroundingsPressure, digits);
+    const auto in = [&](std::string_view unit) {
+        return units::typedIn(value, quantity, unit, units.surroundingsPressure, digits);
+    };
+    auto text = in(unitFor(quantity, value, units));
+    if (!text) text = in(units::facts(quantity).unit); // a figure with a power of ten in place of a prefix
     return text ? QString::fromStdString(*text) : QString();
 }
 

@@ -43,7 +43,7 @@ RichText plain(const QString &text)
 /// "10 bar", or the symbol of the state referred to: T₁.
 RichText valueWords(const QString &typedText, const char *symbol)
 {
-    if (!typedText.startsWith(QLatin1Char('@'))) return plain(printed(typedText));
+    if (!typedText.startsWith(QLatin1Char('@'))) return plain(asPrinted(typedText));
     return marked(QStringLiteral("<i>%1</i><sub>%2</sub>").arg(QString::fromUtf8(symbol), typedText.mid(1)));
 }
 
@@ -76,7 +76,7 @@ RichText exponentWords(const Json &segment, const path::SegmentResult *result)
     QString exponent = typedAt(segment, "/exponent");
     if (exponent.isEmpty() && result && result->exponent) exponent = QString::number(*result->exponent, 'f', 3);
     if (exponent.isEmpty()) return {};
-    return marked(QStringLiteral(", <i>n</i> ")) + plain(printed(exponent));
+    return marked(QStringLiteral(", <i>n</i> ")) + plain(asPrinted(exponent));
 }
 
 } // namespace

@@ -116,7 +116,7 @@ document::Design startEntered(const document::Design &design, const FormField &f
 QStringList startWords(const document::Design &design)
 {
     QStringList words;
-    for (const Quantity quantity : given(design)) words << printed(typedAt(design.json, "/start/" + keyOf(quantity)));
+    for (const Quantity quantity : given(design)) words << asPrinted(typedAt(design.json, "/start/" + keyOf(quantity)));
     return words;
 }
 

@@ -86,7 +86,7 @@ RichText gasWords(const Snapshot &snapshot)
     }
     const QString ratio = typedAt(design.json, "/gas/heat_capacity_ratio");
     RichText words = RichText::plain(name.isEmpty() ? modelWords(design) : name + dot + modelWords(design));
-    if (!ratio.isEmpty()) words += RichText::marked(QStringLiteral(", <i>γ</i> ")) + RichText::plain(printed(ratio));
+    if (!ratio.isEmpty()) words += RichText::marked(QStringLiteral(", <i>γ</i> ")) + RichText::plain(asPrinted(ratio));
     return words;
 }
 
@@ -137,7 +137,7 @@ RichText surroundingsWords(const Snapshot &snapshot)
     const QString pressure = typedAt(snapshot.design.json, "/surroundings/pressure");
     const QString temperature = typedAt(snapshot.design.json, "/surroundings/temperature");
     const auto orDefault = [&](const QString &text, double value, Quantity quantity) {
-        return text.isEmpty() ? shownFigure(value, quantity, snapshot.units) : printed(text);
+        return text.isEmpty() ? shownFigure(value, quantity, snapshot.units) : asPrinted(text);
     };
     const path::Surroundings standard;
     return RichText::plain(orDefault(pressure, standard.pressure, Quantity::pressure) + dot +
@@ -209,7 +209,7 @@ HeaderText headerText(HeaderPart part, const Snapshot &snapshot)
     case HeaderPart::units: return {say("units"), unitsWords(snapshot.units)};
     case HeaderPart::rate: {
         const QString rate = typedAt(snapshot.design.json, "/rate");
-        return {say("rate"), RichText::plain(rate.isEmpty() ? say("none") : printed(rate))};
+        return {say("rate"), RichText::plain(rate.isEmpty() ? say("none") : asPrinted(rate))};
     }
     }
     return {};

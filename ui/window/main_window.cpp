@@ -44,6 +44,8 @@ void MainWindow::createViews()
     m_header = new HeaderBar(m_session, this);
     m_workspace = new Workspace(m_session, this);
     m_ledger = new LedgerPanel(m_session, this);
+    m_edge = new EdgeGrip(this);
+    m_edge->setObjectName(QStringLiteral("ledgerEdge"));
     m_status = new StatusLine(m_session, this);
     m_welcome = new Welcome(m_session.library(), this);
     m_welcome->setRecentFiles(m_settings.value(settings::recentFiles));
@@ -57,6 +59,10 @@ void MainWindow::connectViews()
     connect(m_header, &HeaderBar::partRequested, this, &MainWindow::openPart);
     connect(m_header, &HeaderBar::menuRequested, this, &MainWindow::showMenu);
     connect(&m_header->report(), &QPushButton::clicked, action(ActionId::reportA4), &QAction::trigger);
+    connect(m_edge, &EdgeGrip::dragged, this, [this](int x) {
+        m_settings.set(settings::ledgerWidth, std::clamp(width() - x, leastLedger, mostLedger));
+        layOut();
+    });
     connect(m_notice, &NoticeBar::changed, this, &MainWindow::layOut);
     connect(m_workspace, &Workspace::hinted, m_status, &StatusLine::setHint);
     connect(&m_workspace->canvas(), &Canvas::remarked, m_status, &StatusLine::say);
@@ -124,9 +130,12 @@ void MainWindow::layOut()
     m_status->setGeometry(0, bottom, width(), StatusLine::height);
     m_welcome->setGeometry(0, top, width(), bottom - top);
     m_workspace->setVisible(design);
+    m_edge->setGeometry(width() - ledger - EdgeGrip::width / 2, top, EdgeGrip::width, bottom - top);
+    m_edge->setVisible(design);
     m_ledger->setVisible(design);
     m_welcome->setVisible(!design);
     if (!design) m_welcome->raise();
+    m_edge->raise();
     m_notice->raise();
     m_popover->raise();
 }

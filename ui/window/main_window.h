@@ -6,6 +6,7 @@
 #include "ui/session/recovery.h"
 #include "ui/session/settings.h"
 #include "ui/window/action_table.h"
+#include "ui/window/edge_grip.h"
 #include "ui/window/header_bar.h"
 #include "ui/window/header_popover.h"
 #include "ui/window/notice_bar.h"
@@ -88,6 +89,7 @@ private:
     LedgerPanel *m_ledger = nullptr;
     StatusLine *m_status = nullptr;
     Welcome *m_welcome = nullptr;
+    EdgeGrip *m_edge = nullptr;
     QTimer m_autosave;
     bool m_mayClose = false;
 };

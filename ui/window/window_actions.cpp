@@ -1,5 +1,6 @@
 // What the actions of the window do.
 
+#include "ui/session/design_reading.h"
 #include "ui/strip/kind_menu.h"
 #include "ui/strip/segment_edits.h"
 #include "ui/window/main_window.h"
