@@ -38,9 +38,12 @@ Scale scaleOf(const Figures<Row> &figures, const std::vector<Row> &rows, const D
     return units::scaleFor(figures.quantity, values, units);
 }
 
+/// "W/J"; a unit that is itself a quotient stands in parentheses (ISO 80000-1, 7.1.4): "S/(J/K)".
 std::string heading(const std::string &symbol, const Scale &scale)
 {
-    return scale.unit.empty() ? symbol : symbol + "/" + scale.unit;
+    if (scale.unit.empty()) return symbol;
+    const bool isQuotient = scale.unit.find('/') != std::string::npos;
+    return symbol + (isQuotient ? "/(" + scale.unit + ")" : "/" + scale.unit);
 }
 
 std::string cell(const std::optional<double> &value, const Scale &scale)
