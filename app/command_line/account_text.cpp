@@ -4,6 +4,7 @@
 #include "app/command_line/table.h"
 
 #include <algorithm>
+#include <cmath>
 #include <functional>
 
 namespace quasistat::app
@@ -38,9 +39,12 @@ Scale scaleOf(const Figures<Row> &figures, const std::vector<Row> &rows, const D
     return units::scaleFor(figures.quantity, values, units);
 }
 
+/// "W/J"; a unit that is itself a quotient stands in parentheses (ISO 80000-1, 7.1.4): "S/(J/K)".
 std::string heading(const std::string &symbol, const Scale &scale)
 {
-    return scale.unit.empty() ? symbol : symbol + "/" + scale.unit;
+    if (scale.unit.empty()) return symbol;
+    const bool isQuotient = scale.unit.find('/') != std::string::npos;
+    return symbol + (isQuotient ? "/(" + scale.unit + ")" : "/" + scale.unit);
 }
 
 std::string cell(const std::optional<double> &value, const Scale &scale)
@@ -110,15 +114,48 @@ std::vector<LedgerColumn> ledgerColumns(const path::Totals &totals, double sign)
     };
 }
 
-std::string ledgerText(const Evaluation &evaluation, const DisplayUnits &units)
+/// One scale for every energy of the ledger and one for every entropy, so that rows add up as printed.
+struct LedgerScales {
+    Scale energy;
+    Scale entropy;
+    [[nodiscard]] const Scale &of(Quantity quantity) const { return quantity == Quantity::entropy ? entropy : energy; }
+};
+
+/// A scale for `values`; where they are nothing but rounding, for `everyday`, which belongs to the charge.
+Scale ledgerScale(Quantity quantity, std::vector<double> values, double everyday, const DisplayUnits &units)
+{
+    constexpr double rounding = 1e-9; // as an audit allows
+    const bool isRounding = std::ranges::all_of(values, [&](double v) { return std::abs(v) <= rounding * everyday; });
+    if (isRounding) values.assign(1, everyday);
+    return units::scaleFor(quantity, values, units);
+}
+
+LedgerScales ledgerScales(const Evaluation &evaluation, const std::vector<LedgerColumn> &ledger,
+                          const DisplayUnits &units)
+{
+    std::vector<double> energies;
+    std::vector<double> entropies;
+    for (const LedgerColumn &column : ledger) {
+        std::vector<double> &values = column.figures.quantity == Quantity::entropy ? entropies : energies;
+        for (const SegmentResult &segment : evaluation.path.segments)
+            if (const std::optional<double> value = column.figures.value(segment)) values.push_back(*value);
+        if (column.total) values.push_back(*column.total);
+    }
+    const gas::State &charge = evaluation.path.states.front().state;
+    const double entropy = charge.amount() * charge.gas().gasConstant();
+    const double energy = entropy * charge.temperature().value_or(0.0);
+    return {ledgerScale(Quantity::energy, std::move(energies), energy, units),
+            ledgerScale(Quantity::entropy, std::move(entropies), entropy, units)};
+}
+
+std::string ledgerText(const Evaluation &evaluation, const std::vector<LedgerColumn> &ledger,
+                       const LedgerScales &shared, const DisplayUnits &units)
 {
     const std::vector<SegmentResult> &segments = evaluation.path.segments;
-    const double sign = units.workByGas ? -1.0 : 1.0;
-    const std::vector<LedgerColumn> ledger = ledgerColumns(evaluation.path.totals, sign);
     std::vector<Table::Column> columns{{"segment"}, {"kind", Align::left}, {"label", Align::left}};
     std::vector<Scale> scales;
     for (const LedgerColumn &column : ledger) {
-        scales.push_back(scaleOf(column.figures, segments, units, column.total));
+        scales.push_back(shared.of(column.figures.quantity));
         columns.push_back({heading(column.figures.symbol, scales.back())});
     }
     columns.push_back({"audit", Align::left});
@@ -139,7 +176,7 @@ std::string ledgerText(const Evaluation &evaluation, const DisplayUnits &units)
            table.text();
 }
 
-std::string totalsText(const path::Totals &totals, const DisplayUnits &units)
+std::string totalsText(const path::Totals &totals, const Scale &energy, const DisplayUnits &units)
 {
     struct Line {
         const char *words;
@@ -163,7 +200,9 @@ std::string totalsText(const path::Totals &totals, const DisplayUnits &units)
     for (const Line &line : lines)
         if (line.value)
             text += "  " + std::string(line.words) + std::string(width + 2 - characterCount(line.words), ' ') +
-                    units::shown(*line.value, line.quantity, units) + "\n";
+                    (line.quantity == Quantity::energy ? units::digits(*line.value, energy) + "\u202F" + energy.unit
+                                                       : units::shown(*line.value, line.quantity, units)) +
+                    "\n";
     return text;
 }
 
@@ -211,9 +250,12 @@ std::string headerText(const document::Design &design, const Evaluation &evaluat
 
 std::string accountText(const document::Design &design, const Evaluation &evaluation, const DisplayUnits &units)
 {
+    const std::vector<LedgerColumn> ledger = ledgerColumns(evaluation.path.totals, units.workByGas ? -1.0 : 1.0);
+    const LedgerScales scales = ledgerScales(evaluation, ledger, units);
     return headerText(design, evaluation, units) + statesText(evaluation, units) + "\n" +
-           ledgerText(evaluation, units) + "\n" + totalsText(evaluation.path.totals, units) + "\n" +
-           envelopeText(evaluation, units) + warningsText(evaluation.path.warnings, units) +
+           ledgerText(evaluation, ledger, scales, units) + "\n" +
+           totalsText(evaluation.path.totals, scales.energy, units) + "\n" + envelopeText(evaluation, units) +
+           warningsText(evaluation.path.warnings, units) +
            "Results are estimates for planning. Pressure equipment, relief and oxygen service are governed by local "
            "codes\n"
            "and must be reviewed by a licensed or otherwise competent person.\n";

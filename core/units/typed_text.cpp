@@ -6,6 +6,7 @@
 
 #include <fmt/format.h>
 
+#include <charconv>
 #include <cmath>
 #include <cstdlib>
 
@@ -43,6 +44,14 @@ Outcome<Axis> axisOf(Quantity quantity, std::string_view text, double surroundin
     return Axis{unit->factor, isDifference(quantity) ? 0.0 : unit->offset + gauge};
 }
 
+/// The value of a number as printed here, whatever the desktop's decimal sign is.
+double parsed(const std::string &number)
+{
+    double value = 0.0;
+    std::from_chars(number.data(), number.data() + number.size(), value);
+    return value;
+}
+
 /// `value` at `digits` significant digits, plain decimal where that stays short.
 std::string decimalText(double value, int digits)
 {
@@ -54,8 +63,7 @@ std::string decimalText(double value, int digits)
         if (mantissa.ends_with('.')) mantissa.pop_back();
         return fmt::format("{}e{}", mantissa, exponent);
     }
-    std::string text =
-        fmt::format("{:.{}f}", std::strtod(scientific.c_str(), nullptr), std::max(0, digits - 1 - exponent));
+    std::string text = fmt::format("{:.{}f}", parsed(scientific), std::max(0, digits - 1 - exponent));
     if (text.find('.') != std::string::npos) text.erase(text.find_last_not_of('0') + 1);
     if (text.ends_with('.')) text.pop_back();
     return text == "-0" ? "0" : text;
@@ -87,7 +95,7 @@ Outcome<std::string> typedIn(double value, Quantity quantity, std::string_view u
     if (std::abs(typed) <= tolerance) number.assign(1, '0');
     for (int digits = 1; digits < 17 && number != "0"; ++digits) {
         const std::string shorter = decimalText(typed, digits);
-        if (std::abs(std::strtod(shorter.c_str(), nullptr) - typed) <= tolerance * (1.0 + 1e-12)) {
+        if (std::abs(parsed(shorter) - typed) <= tolerance * (1.0 + 1e-12)) {
             number = shorter;
             break;
         }

@@ -25,7 +25,7 @@ struct Unit {
 /// `unit` measures `quantity`, an amount also by mass.
 [[nodiscard]] bool measures(const Unit &unit, Quantity quantity);
 
-/// The reverse of the typed text for people: "degC" → "°C", "cm3" → "cm³", "L.atm" → "L·atm".
+/// `text` as it is printed: "degC" → "°C", "cm3" → "cm³", "L.atm" → "L·atm".
 [[nodiscard]] std::string printedUnit(std::string_view text);
 
 } // namespace quasistat::units

@@ -5,6 +5,8 @@
 
 #include <fmt/format.h>
 
+#include <locale.h> // newlocale and uselocale are POSIX
+
 #include <algorithm>
 #include <charconv>
 #include <cmath>
@@ -226,6 +228,29 @@ private:
     bool m_afterBlank = false; ///< blanks were skipped just now: they multiply where no sign follows
 };
 
+/// UDUNITS-2 reads its table and its numbers with the C library, in the language of the desktop: where that writes a
+/// decimal comma, "0.0254" would end at its point. While this lives, the calling thread reads them as they are written.
+class PlainNumerals
+{
+public:
+    PlainNumerals() : m_plain(::newlocale(LC_NUMERIC_MASK, "C", nullptr))
+    {
+        if (m_plain) m_before = ::uselocale(m_plain);
+    }
+    ~PlainNumerals()
+    {
+        if (!m_plain) return;
+        ::uselocale(m_before);
+        ::freelocale(m_plain);
+    }
+    PlainNumerals(const PlainNumerals &) = delete;
+    PlainNumerals &operator=(const PlainNumerals &) = delete;
+
+private:
+    locale_t m_plain;
+    locale_t m_before = nullptr;
+};
+
 /// A factor that is a short decimal but for rounding becomes that decimal: (0.01)³ is 1e-6, not 1.0000000000000002e-06.
 double withoutRounding(double factor)
 {
@@ -256,6 +281,7 @@ std::optional<Unit> conversion(ut_unit *unit, ut_system *system, std::string_vie
 
 UnitSystem::UnitSystem()
 {
+    const PlainNumerals numerals;
     ut_set_error_message_handler(ut_ignore);
     m_system = ut_read_xml(nullptr);
 }
@@ -277,6 +303,7 @@ Outcome<Unit> UnitSystem::unit(std::string_view text) const
             if (row.unit == special.siUnit)
                 return Unit{.siUnit = row.unit, .factor = special.factor, .offset = special.offset};
     }
+    const PlainNumerals numerals;
     const Outcome<UnitPtr> unit = Expression(m_system, text).whole();
     if (!unit) return unit.failure();
     for (const QuantityFacts &row : quantityTable)

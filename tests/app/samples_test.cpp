@@ -19,20 +19,20 @@ namespace
 
 using Json = nlohmann::json;
 
-struct Run {
-    std::string output;
+struct Output {
+    std::string text;
     int status;
 };
 
-Run run(const std::string &words)
+Output run(const std::string &words)
 {
     const std::string command = std::string("'") + QUASISTAT_PROGRAM + "' " + words + " 2>&1";
-    Run result{{}, -1};
+    Output result{{}, -1};
     FILE *pipe = popen(command.c_str(), "r");
     if (!pipe) return result;
     std::array<char, 4096> buffer{};
     while (const std::size_t count = fread(buffer.data(), 1, buffer.size(), pipe))
-        result.output.append(buffer.data(), count);
+        result.text.append(buffer.data(), count);
     result.status = WEXITSTATUS(pclose(pipe));
     return result;
 }
@@ -52,18 +52,18 @@ class Sample : public testing::TestWithParam<std::string>
 
 TEST_P(Sample, HasEveryAuditGood)
 {
-    const Run check = run("check '" + GetParam() + "'");
+    const Output check = run("check '" + GetParam() + "'");
     EXPECT_TRUE(check.status == 0 || check.status == 1)
-        << check.output; // 1: a limit is exceeded, as some samples mean to show
-    EXPECT_NE(check.output.find("audit agrees: segment 1"), std::string::npos) << check.output;
-    EXPECT_EQ(check.output.find("audit FAILED"), std::string::npos) << check.output;
+        << check.text; // 1: a limit is exceeded, as some samples mean to show
+    EXPECT_NE(check.text.find("audit agrees: segment 1"), std::string::npos) << check.text;
+    EXPECT_EQ(check.text.find("audit FAILED"), std::string::npos) << check.text;
 }
 
 TEST_P(Sample, WorkAndHeatFollowFromItsCurvesByCubicSplines)
 {
-    const Run compute = run("compute '" + GetParam() + "' --json --curves 401");
-    ASSERT_EQ(compute.status, 0) << compute.output;
-    const Json result = Json::parse(compute.output);
+    const Output compute = run("compute '" + GetParam() + "' --json --curves 401");
+    ASSERT_EQ(compute.status, 0) << compute.text;
+    const Json result = Json::parse(compute.text);
     for (const Json &segment : result.at("segments")) {
         if (!segment.contains("curve")) continue;
         const Json &curve = segment.at("curve");

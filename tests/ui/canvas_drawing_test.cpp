@@ -56,7 +56,7 @@ private slots:
         const QString text = QString::fromUtf8(*bytes);
         QVERIFY(!text.contains(QLatin1String("<image")));
         QVERIFY(text.contains(QLatin1String("second stage")));
-        QVERIFY(text.contains(QStringLiteral("10.000\u202Fbar")));
+        QVERIFY(text.contains(QRegularExpression(QStringLiteral("10\\.000[\u202F\u2009]bar")))); // as the face has it
         QVERIFY(text.count(QLatin1String("<path")) + text.count(QLatin1String("<polyline")) > 20);
     }
 

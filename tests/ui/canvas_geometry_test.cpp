@@ -162,7 +162,7 @@ private slots:
         const auto places = ticker.places(QCPRange(0.0, 5.4), 1020.0, 150.0);
         QCOMPARE(places.size(), 6);
         QCOMPARE(tickText(places.at(5), ticker.decimals()), QStringLiteral("5"));
-        ticker.places(QCPRange(0.0, 0.54), 1020.0, 150.0);
+        (void)ticker.places(QCPRange(0.0, 0.54), 1020.0, 150.0);
         QCOMPARE(ticker.decimals(), 1);
         QCOMPARE(tickText(0.0, 1), QStringLiteral("0"));
         QCOMPARE(tickText(-0.5, 1), QChar(0x2212) + QStringLiteral("0.5"));

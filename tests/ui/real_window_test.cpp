@@ -3,6 +3,8 @@
 #include "tests/ui/open_window.h"
 #include "ui/canvas/canvas.h"
 #include "ui/canvas/diagram.h"
+#include "ui/ledger/ledger_rows.h"
+#include "ui/session/sentences.h"
 
 #include <QProcess>
 
@@ -58,7 +60,7 @@ void RealWindowTest::a_dragged_handle_reaches_the_report()
     text.start(QStringLiteral("pdftotext"), {QStringLiteral("-layout"), file, QStringLiteral("-")});
     QVERIFY(text.waitForFinished());
     const QString words = QString::fromUtf8(text.readAllStandardOutput());
-    const QString figure = QString::number(std::abs(work) / 1000.0, 'f', 3); // in kJ, as the ledger shows it
+    const QString figure = ui::figure(work, accountScale(session.now().evaluation->path, session.now().units));
     QVERIFY2(words.contains(figure), qPrintable(figure + QLatin1Char('\n') + words));
     QProcess open;
     open.start(QStringLiteral("qpdf"), {QStringLiteral("--qdf"), file, QStringLiteral("-")});

@@ -158,7 +158,7 @@ BoundaryScene boundaryScene(const Snapshot &snapshot, const Plane &plane, const 
     BoundaryScene scene;
     const analysis::Evaluation &evaluation = *snapshot.evaluation;
     if (evaluation.limits.empty() || evaluation.path.states.empty()) return scene;
-    const QFont font = face(style.labelPixels, QFont::DemiBold);
+    const QFont font = style.font(style.labelPixels, QFont::DemiBold);
     scene.forbidden.setFillRule(Qt::WindingFill);
     const analysis::Window window{plane.view.volume, plane.view.pressure};
     for (const auto &stretch : analysis::boundary(evaluation.limits, evaluation.path.states.front().state, window)) {

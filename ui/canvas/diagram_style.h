@@ -2,6 +2,7 @@
 // How a diagram is drawn for its purpose: the window, a drawing of its own, or a page of the report.
 
 #include "ui/look/palette.h"
+#include "ui/look/type.h"
 
 #include <QMarginsF>
 
@@ -23,6 +24,10 @@ struct DiagramStyle {
     double emphasisedCurve = 3.5;      ///< [px] width where selected or hovered
 
     [[nodiscard]] bool isPrint() const { return purpose != Purpose::window; }
+    [[nodiscard]] QFont font(double pixels, QFont::Weight weight = QFont::Normal) const
+    {
+        return isPrint() ? printFace(pixels, weight) : face(pixels, weight);
+    }
     [[nodiscard]] double type(double pixels) const
     {
         return pixels * labelPixels / 12.0;

@@ -62,8 +62,8 @@ class LabelMaker
 public:
     LabelMaker(const Scene &scene, const Snapshot &snapshot, const DiagramStyle &style)
         : m_scene(scene), m_snapshot(snapshot), m_path(snapshot.evaluation->path), m_style(style),
-          m_plain(face(style.labelPixels)), m_medium(face(style.labelPixels, QFont::Medium)),
-          m_strong(face(style.labelPixels, QFont::DemiBold))
+          m_plain(style.font(style.labelPixels)), m_medium(style.font(style.labelPixels, QFont::Medium)),
+          m_strong(style.font(style.labelPixels, QFont::DemiBold))
     {
         std::vector<double> energies;
         for (const auto &segment : m_path.segments) {

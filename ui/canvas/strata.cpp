@@ -96,14 +96,14 @@ void paintAxes(QPainter &painter, const Painting &p)
     for (const auto &tick : p.scene.axes.pressure)
         painter.drawLine(QLineF(rect.left() - 5, tick.place, rect.left(), tick.place));
 
-    const QFont labels = face(p.style.labelPixels);
+    const QFont labels = p.style.font(p.style.labelPixels);
     const double size = p.style.labelPixels;
     painter.setPen(faded(p.style.palette.ink, 0.8));
     for (const auto &tick : p.scene.axes.volume)
         drawText(painter, {tick.place, rect.bottom() + 8.0 + size}, tick.text, labels, Align::centre);
     for (const auto &tick : p.scene.axes.pressure)
         drawText(painter, {rect.left() - 10.0, tick.place + 0.36 * size}, tick.text, labels, Align::right);
-    const QFont titles = face(p.style.type(13));
+    const QFont titles = p.style.font(p.style.type(13));
     painter.setPen(p.style.palette.ink);
     drawText(painter, {rect.right(), rect.bottom() + 12.0 + 2.0 * size}, p.scene.axes.volumeTitle, titles,
              Align::right);
@@ -137,7 +137,7 @@ void paintBoundary(QPainter &painter, const Painting &p)
     drawLines(painter, p.scene.boundary.lines);
     painter.setPen(QPen(faded(colour, 0.9), 1.25));
     painter.drawLines(p.scene.boundary.ticks);
-    const QFont font = face(p.style.labelPixels, QFont::DemiBold);
+    const QFont font = p.style.font(p.style.labelPixels, QFont::DemiBold);
     for (const auto &label : p.scene.boundary.labels) {
         painter.save();
         painter.translate(label.centre);

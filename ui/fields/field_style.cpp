@@ -28,6 +28,8 @@ QPushButton[role="primary"] { background: @accent; color: @onAccent; border: non
 QPushButton[role="primary"]:focus { border: 2px solid @ink; padding: 3px 11px; }
 QPushButton[role="quiet"] { border: none; color: @accent; padding: 2px 4px; text-align: left; }
 QPushButton[role="quiet"]:focus { border: 1px solid @accent; padding: 1px 3px; }
+QScrollArea, QScrollArea > QWidget > QWidget { background: transparent; }
+QPushButton[role="sample"] { border: none; min-height: 88px; padding: 0; }
 QMenu { background: @ground; color: @ink; border: 1px solid @edge; padding: 4px 0; }
 QMenu::item { padding: 5px 28px 5px 24px; }
 QMenu::item:selected { background: @tint; }

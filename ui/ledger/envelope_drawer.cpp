@@ -99,6 +99,7 @@ EnvelopeDrawer::EnvelopeDrawer(Session &session, QWidget *parent)
     auto *title = new QLabel(tr("Envelope"), this);
     title->setFont(headingFace());
     auto *close = new QPushButton(tr("Back to the ledger"), this);
+    close->setFont(labelFace());
     close->setObjectName(QStringLiteral("closeEnvelope"));
     close->setProperty("role", QStringLiteral("quiet"));
     connect(close, &QPushButton::clicked, this, &EnvelopeDrawer::closed);
@@ -121,6 +122,7 @@ EnvelopeDrawer::EnvelopeDrawer(Session &session, QWidget *parent)
     column->addWidget(scroll, 1);
 
     auto *another = new QPushButton(tr("Add a limit"), this);
+    another->setFont(bodyFace());
     another->setObjectName(QStringLiteral("addLimit"));
     connect(another, &QPushButton::clicked, this, &EnvelopeDrawer::add);
     column->addWidget(another);
@@ -177,6 +179,7 @@ QWidget *EnvelopeDrawer::createLimit(int limit)
     fields->setRejectsInvalid(true);
     fields->setLook(m_look);
     auto *gone = new QPushButton(tr("Remove this limit"), block);
+    gone->setFont(labelFace());
     gone->setObjectName(QStringLiteral("removeLimit%1").arg(limit + 1));
     gone->setProperty("role", QStringLiteral("quiet"));
     column->addWidget(fields);

@@ -19,7 +19,7 @@ QString say(const char *text)
 }
 
 // Published texts that define what is computed.
-constexpr const char *definitionOfWork = "source: IUPAC Green Book, 3rd ed. (2007), section 2.11";
+constexpr const char *definitionOfWork = "source: IUPAC Green Book (2007), section 2.11";
 constexpr const char *clausius = "source: R. Clausius, Annalen der Physik 125 (1865) 353";
 constexpr const char *gouyStodola = "source: G. Gouy, J. Phys. Théor. Appl. 8 (1889) 501";
 constexpr const char *carnot = "source: S. Carnot, Réflexions sur la puissance motrice du feu (1824)";

@@ -115,10 +115,10 @@ void LedgerView::paintAccountRow(QPainter &painter, const LedgerRow &row, const 
     const QFont name = face(13, total || selected ? QFont::DemiBold : QFont::Normal);
     painter.setPen(m_look.secondary());
     drawText(painter, {margin, y}, row.lead, labelFace());
-    const double left = total ? margin : margin + 8 + std::max(6.0, textWidth(row.lead, labelFace()));
+    const double left = total ? margin : margin + 7 + std::max(7.0, textWidth(row.lead, labelFace()));
     painter.setPen(m_look.ink);
     const double firstFigure = columnRight(0) - textWidth(row.figures.value(0), bodyFace());
-    drawFitted(painter, {left, y}, row.label, name, firstFigure - 8 - left);
+    drawFitted(painter, {left, y}, row.label, name, firstFigure - 4 - left);
     const QFont figures = face(13, total ? QFont::DemiBold : QFont::Normal);
     for (int column = 0; column < row.figures.size(); ++column) {
         const bool struck = row.struck && column == 1;

@@ -39,6 +39,15 @@ QFont runFont(const QFont &font, const Run &run)
     return result;
 }
 
+/// A face without the narrow no-break space gets a thin one: a space borrowed from another face would tear the text in two.
+QString spelledIn(const QFont &font, const QString &text)
+{
+    constexpr QChar narrow(0x202f);
+    if (!text.contains(narrow) || QFontMetricsF(font).inFont(narrow)) return text;
+    QString spelled = text;
+    return spelled.replace(narrow, QChar(0x2009));
+}
+
 double baselineShift(const QFont &font, const Run &run)
 {
     return run.subscript ? 0.2 * font.pixelSize() : 0.0;
@@ -110,8 +119,10 @@ qsizetype decimalPlace(const QString &figure)
 double textWidth(const RichText &text, const QFont &font)
 {
     double width = 0.0;
-    for (const auto &run : text.runs())
-        width += eachPiece(run.text, runFont(font, run), [](double, const QString &) {});
+    for (const auto &run : text.runs()) {
+        const QFont used = runFont(font, run);
+        width += eachPiece(spelledIn(used, run.text), used, [](double, const QString &) {});
+    }
     return width;
 }
 
@@ -131,10 +142,11 @@ void drawText(QPainter &painter, QPointF anchor, const RichText &text, const QFo
             continue;
         }
         painter.setFont(used);
+        const QString spelled = spelledIn(used, run.text);
         // In an SVG file a run stays one piece of text that can be searched and edited; its viewer sets the digits.
         const bool isSvg = painter.paintEngine()->type() == QPaintEngine::SVG;
-        if (isSvg) painter.drawText(at, run.text);
-        anchor.rx() += eachPiece(run.text, used, [&](double x, const QString &piece) {
+        if (isSvg) painter.drawText(at, spelled);
+        anchor.rx() += eachPiece(spelled, used, [&](double x, const QString &piece) {
             if (!isSvg) painter.drawText(at + QPointF(x, 0.0), piece);
         });
     }

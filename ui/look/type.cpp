@@ -1,6 +1,7 @@
 #include "ui/look/type.h"
 
 #include <QFontDatabase>
+#include <QFontMetricsF>
 
 #include <cmath>
 
@@ -19,6 +20,24 @@ bool isGeneric(const QString &family)
     return false;
 }
 
+QFont sized(const QStringList &families, double pixels, QFont::Weight weight)
+{
+    QFont result;
+    result.setFamilies(families); // the first that is installed
+    result.setPixelSize(static_cast<int>(std::lround(pixels)));
+    result.setWeight(weight);
+    // Fractional advances: a label keeps its width on screen, in print and at any zoom.
+    result.setHintingPreference(QFont::PreferNoHinting);
+    return result;
+}
+
+bool hasTabularDigits(const QFont &font)
+{
+    const QFontMetricsF metrics(font);
+    return std::abs(metrics.horizontalAdvance(QLatin1Char('1')) - metrics.horizontalAdvance(QLatin1Char('8'))) <
+           0.005 * font.pixelSize();
+}
+
 } // namespace
 
 QStringList interfaceFamilies()
@@ -30,13 +49,18 @@ QStringList interfaceFamilies()
 
 QFont face(double pixels, QFont::Weight weight)
 {
-    QFont result;
-    result.setFamilies(interfaceFamilies()); // the first that is installed
-    result.setPixelSize(static_cast<int>(std::lround(pixels)));
-    result.setWeight(weight);
-    // Fractional advances: a label keeps its width on screen, in print and at any zoom.
-    result.setHintingPreference(QFont::PreferNoHinting);
-    return result;
+    return sized(interfaceFamilies(), pixels, weight);
+}
+
+QFont printFace(double pixels, QFont::Weight weight)
+{
+    const QFont interface = face(pixels, weight);
+    QFont font = hasTabularDigits(interface)
+                     ? interface
+                     : sized({QStringLiteral("Open Sans"), QStringLiteral("DejaVu Sans")}, pixels, weight);
+    // Any spacing keeps letters from joining: a search for "first" must find it.
+    font.setLetterSpacing(QFont::AbsoluteSpacing, 0.01);
+    return font;
 }
 
 QFont headingFace()

@@ -12,7 +12,7 @@ namespace
 
 QFont sized(double pixels, QFont::Weight weight = QFont::Normal)
 {
-    return face(pixels * pageUnitsPerPixel, weight);
+    return printFace(pixels * pageUnitsPerPixel, weight);
 }
 
 /// The words of a text with their style; a blank begins a new one.

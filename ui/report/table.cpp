@@ -12,6 +12,9 @@ constexpr double rowPadding = 5.4 * pageUnitsPerPixel;
 constexpr double hairline = 0.5 * pageUnitsPerPixel;
 constexpr double heavyLine = 1.0 * pageUnitsPerPixel;
 
+/// A table of so few rows is not torn over two pages.
+constexpr std::size_t shortTable = 10;
+
 struct Place {
     double left;
     double width;
@@ -131,7 +134,7 @@ std::vector<Block> table(const std::vector<TableColumn> &columns, const std::vec
                                       paintRule(painter, {at.x(), at.y() + row.height - hairline}, width, hairline,
                                                 faded(look.ink, isLast ? 0.5 : 0.25));
                               },
-                          .keepWithNext = r + 2 == rows.size(),
+                          .keepWithNext = r + 2 == rows.size() || (rows.size() <= shortTable && !isLast),
                           .runningHead = head});
     }
     return blocks;

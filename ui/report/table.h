@@ -27,7 +27,7 @@ struct TableRow {
 };
 
 /// Figures of one column have the same decimals, so right alignment is alignment at the decimal sign. Long texts run
-/// over several lines of their cell. The last two rows stay together.
+/// over several lines of their cell. A short table stays on one page; of a long one the last two rows stay together.
 [[nodiscard]] std::vector<Block> table(const std::vector<TableColumn> &columns, const std::vector<TableRow> &rows,
                                        double width);
 

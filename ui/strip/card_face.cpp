@@ -75,6 +75,7 @@ CardFace faceOf(const document::Json &segment, int index, const Snapshot &snapsh
     face.kind = path::kindFromKey(typedAt(segment, "/kind").toStdString());
     face.title = segmentTitle(segment);
     face.end = endWords(segment);
+    face.endInShort = endWordsInShort(segment);
     const auto at = static_cast<std::size_t>(index);
     const path::PathResult *path = snapshot.evaluation ? &snapshot.evaluation->path : nullptr;
     const path::SegmentResult *result = path && at < path->segments.size() ? &path->segments[at] : nullptr;
@@ -116,7 +117,7 @@ StripFaces stripFaces(const Snapshot &snapshot)
     if (scale.decimals > 1) --scale.decimals; // the ledger has them all; a card is read at a glance
     if (faces.scale.largest > 0.0)
         faces.scale.caption =
-            say("%1 either way").arg(shownFigure(faces.scale.largest, units::Quantity::energy, snapshot.units, 3));
+            say("full bar: %1").arg(shownFigure(faces.scale.largest, units::Quantity::energy, snapshot.units, 3));
     for (int k = 0; k < segmentCount(snapshot.design); ++k)
         faces.cards.push_back(faceOf(*segmentAt(snapshot.design, k), k, snapshot, scale));
     return faces;

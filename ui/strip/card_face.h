@@ -26,6 +26,7 @@ struct CardFace {
     QString title;
     RichText second; ///< the kind, where the title is a label
     RichText end;
+    RichText endInShort; ///< where a narrow card has no room for it
     CardStanding standing = CardStanding::good;
     QString mark;      ///< the limit's name, "audit"
     QString sentence;  ///< of an error, or what is waited for
@@ -41,7 +42,7 @@ struct CardFace {
 /// One scale for the bars of all cards.
 struct StripScale {
     double largest = 0.0; ///< |W| or |Q| [J] of a full bar
-    QString caption;      ///< "900 J either way"
+    QString caption;      ///< "full bar: 900 J"
 };
 
 struct StripFaces {

@@ -165,8 +165,8 @@ void paintCardGround(QPainter &painter, const QRectF &card, const CardPose &pose
     painter.restore();
     if (pose.unfolded) {
         painter.setPen(QPen(faded(look.ink, 0.14), 1));
-        painter.drawLine(QPointF(card.left() + inset, card.top() + 0.5),
-                         QPointF(card.right() - inset, card.top() + 0.5));
+        painter.drawLine(QPointF(card.left() + inset, card.top() + 1.5),
+                         QPointF(card.right() - inset, card.top() + 1.5));
     }
     if (pose.focused && !pose.unfolded) {
         painter.setPen(QPen(look.accent, 1, Qt::DotLine));
@@ -183,8 +183,10 @@ void paintCard(QPainter &painter, const QRectF &card, const CardFace &content, c
     paintHead(painter, card, content, look);
     const double right = paintMark(painter, card, content, pose, look);
     painter.setPen(look.ink);
-    drawElided(painter, {card.left() + inset, card.top() + 56}, content.end, face(13, QFont::Medium),
-               right - card.left() - inset);
+    const QFont endFace = face(13, QFont::Medium);
+    const double room = right - card.left() - inset;
+    const bool fits = textWidth(content.end, endFace) <= room;
+    drawElided(painter, {card.left() + inset, card.top() + 56}, fits ? content.end : content.endInShort, endFace, room);
     if (content.hasFigures()) {
         paintBars(painter, card, content, pose, scale, look);
         return;

@@ -11,6 +11,7 @@
 #include <QEvent>
 #include <QMouseEvent>
 #include <QPainter>
+#include <QPainterPath>
 #include <QVBoxLayout>
 
 namespace quasistat::ui
@@ -19,8 +20,9 @@ namespace quasistat::ui
 namespace
 {
 
+constexpr double radius = 6.0;
 constexpr int narrow = 264;
-constexpr int wide = 516;
+constexpr int wide = 620;
 constexpr std::size_t linesInOneColumn = 3;
 
 const path::SegmentResult *resultOf(const Snapshot &snapshot, int segment)
@@ -272,10 +274,18 @@ void CardPanel::paintEvent(QPaintEvent *)
 {
     QPainter painter(this);
     painter.setRenderHint(QPainter::Antialiasing);
-    const QRectF outline = QRectF(rect()).adjusted(1, 1, -1, m_card.width() < width() ? -1 : 12);
     painter.setPen(QPen(m_look.accent, 2));
     painter.setBrush(m_look.ground);
-    painter.drawRoundedRect(outline, 6, 6);
+    // Rounded above; below the sides run on into the card.
+    const QRectF box = QRectF(rect()).adjusted(1, 1, -1, m_card.width() < width() ? -1 : 12);
+    QPainterPath outline(box.bottomLeft());
+    outline.lineTo(box.left(), box.top() + radius);
+    outline.arcTo(QRectF(box.left(), box.top(), 2 * radius, 2 * radius), 180, -90);
+    outline.lineTo(box.right() - radius, box.top());
+    outline.arcTo(QRectF(box.right() - 2 * radius, box.top(), 2 * radius, 2 * radius), 90, -90);
+    outline.lineTo(box.bottomRight());
+    outline.closeSubpath();
+    painter.drawPath(outline);
     if (m_card.width() >= width()) return;
     // Wider than its card: the lower edge is open where the card goes on.
     const int from = m_card.left() - x();

@@ -14,14 +14,23 @@ namespace quasistat::ui
 namespace
 {
 
-constexpr int margin = 16;
+constexpr int margin = 12;
 constexpr int gap = 8;
 constexpr int widest = 168;
 constexpr int narrowest = 148;
 constexpr int unfoldedWidth = 264;
-constexpr int startWidth = 96;
-constexpr int nextWidth = 92;
-constexpr int nextHeight = 78;
+constexpr int startWidth = 84;
+constexpr int nextWidth = 86;
+
+/// Leaves the arrow keys to the strip: they go from card to card, the row follows.
+class CardScroll : public QScrollArea
+{
+public:
+    using QScrollArea::QScrollArea;
+
+protected:
+    void keyPressEvent(QKeyEvent *event) override { event->ignore(); }
+};
 
 } // namespace
 
@@ -42,7 +51,7 @@ PathStrip::PathStrip(Session &session, QWidget *parent)
 
 void PathStrip::createViews()
 {
-    m_scroll = new QScrollArea(this);
+    m_scroll = new CardScroll(this);
     m_scroll->setFrameShape(QFrame::NoFrame);
     m_scroll->setVerticalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
     m_scroll->setFocusPolicy(Qt::NoFocus);

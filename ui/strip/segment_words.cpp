@@ -65,10 +65,27 @@ RichText endValueWords(const Json &segment, path::EndKey key)
     return words;
 }
 
-RichText balanceWords(const Json &segment)
+/// `to`: with the word in front.
+RichText balanceWords(const Json &segment, bool to)
 {
-    if (valueAt(segment, "/load")) return plain(say("to balance with the load"));
-    return plain(say("to balance at ")) + valueWords(typedAt(segment, "/external_pressure"), "p");
+    if (valueAt(segment, "/load")) return plain(to ? say("to balance with the load") : say("balance with the load"));
+    return plain(to ? say("to balance at ") : say("balance at ")) +
+           valueWords(typedAt(segment, "/external_pressure"), "p");
+}
+
+RichText endWordsWith(const Json &segment, bool to)
+{
+    const QString state = typedAt(segment, "/end/state");
+    if (!state.isEmpty()) return plain((to ? say("to state %1") : say("state %1")).arg(state));
+    const auto keys = endKeysOf(segment);
+    if (keys.empty() && kindOf(segment) == Kind::constantExternalPressure) return balanceWords(segment, to);
+    if (keys.empty()) return {};
+    RichText words = to ? plain(say("to ")) : RichText();
+    for (std::size_t i = 0; i < keys.size(); ++i) {
+        if (i > 0) words += plain(QStringLiteral(", "));
+        words += endValueWords(segment, keys[i]);
+    }
+    return words;
 }
 
 RichText exponentWords(const Json &segment, const path::SegmentResult *result)
@@ -109,17 +126,12 @@ RichText kindWords(const Json &segment, const path::SegmentResult *result)
 
 RichText endWords(const Json &segment)
 {
-    const QString state = typedAt(segment, "/end/state");
-    if (!state.isEmpty()) return plain(say("to state %1").arg(state));
-    const auto keys = endKeysOf(segment);
-    if (keys.empty() && kindOf(segment) == Kind::constantExternalPressure) return balanceWords(segment);
-    if (keys.empty()) return {};
-    RichText words = plain(say("to "));
-    for (std::size_t i = 0; i < keys.size(); ++i) {
-        if (i > 0) words += plain(QStringLiteral(", "));
-        words += endValueWords(segment, keys[i]);
-    }
-    return words;
+    return endWordsWith(segment, true);
+}
+
+RichText endWordsInShort(const Json &segment)
+{
+    return endWordsWith(segment, false);
 }
 
 } // namespace quasistat::ui

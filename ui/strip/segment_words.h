@@ -17,5 +17,7 @@ namespace quasistat::ui
 
 /// "to 10 bar", "to T₁", "to balance at 1 bar", "to state 1".
 [[nodiscard]] RichText endWords(const document::Json &segment);
+/// Without its first word: "balance at 1 bar".
+[[nodiscard]] RichText endWordsInShort(const document::Json &segment);
 
 } // namespace quasistat::ui

@@ -34,10 +34,17 @@ MainWindow::MainWindow(const QString &recoveryFolder, QWidget *parent)
     applyScheme();
     enableActions();
     layOut();
+    setFocusPolicy(Qt::ClickFocus);
+    setFocus();
     offerRecovery();
 }
 
-MainWindow::~MainWindow() = default;
+MainWindow::~MainWindow()
+{
+    // The views read the session until their end, so they go before it; and nobody listens to its own going.
+    m_session.disconnect();
+    qDeleteAll(findChildren<QWidget *>(QString(), Qt::FindDirectChildrenOnly));
+}
 
 void MainWindow::createViews()
 {

@@ -15,7 +15,7 @@ namespace quasistat::ui
 SampleButton::SampleButton(Sample sample, const gas::Library &library, QWidget *parent)
     : QPushButton(parent), m_sample(std::move(sample)), m_look(ui::palette(Scheme::light))
 {
-    setFixedHeight(88);
+    setProperty("role", QStringLiteral("sample"));
     setCursor(Qt::PointingHandCursor);
     setObjectName(QStringLiteral("sample.") + m_sample.name);
     setAccessibleName(m_sample.title);

@@ -20,10 +20,11 @@ using document::Json;
 namespace
 {
 
-QString firstSentence(const QString &text)
+/// The notes without the remark that all samples share.
+QString aboutFrom(const QString &notes)
 {
-    const qsizetype end = text.indexOf(QLatin1String(". "));
-    return end < 0 ? text : text.left(end + 1);
+    const QLatin1String remark("Invented data. ");
+    return notes.startsWith(remark) ? notes.mid(remark.size()) : notes;
 }
 
 } // namespace
@@ -40,7 +41,7 @@ std::vector<Sample> samples()
         const Outcome<Design> design = document::read(file.readAll().toStdString(), position);
         if (!design) continue;
         found.push_back({QFileInfo(name).completeBaseName(), typedAt(design->json, "/title"),
-                         firstSentence(typedAt(design->json, "/notes")), *design});
+                         aboutFrom(typedAt(design->json, "/notes")), *design});
     }
     return found;
 }

@@ -13,7 +13,7 @@ namespace quasistat::ui
 struct Sample {
     QString name; ///< of the file, without its ending
     QString title;
-    QString about; ///< the first sentence of its notes
+    QString about; ///< its notes
     document::Design design;
 };
 

@@ -1,5 +1,6 @@
 #include "ui/window/welcome.h"
 
+#include "ui/look/figure_text.h"
 #include "ui/look/type.h"
 #include "ui/window/sample_button.h"
 
@@ -50,6 +51,7 @@ void Welcome::createViews()
     scroll->viewport()->setAutoFillBackground(false);
     auto *page = new QWidget;
     page->setAutoFillBackground(false);
+    page->setMaximumWidth(1200);
     scroll->setWidget(page);
     outer->addWidget(scroll);
 
@@ -85,7 +87,8 @@ void Welcome::createViews()
     column->addWidget(m_recent);
 
     column->addSpacing(8);
-    column->addWidget(words(tr("Or take a sample of the gas workshop and change it"), titleFace(), false, page));
+    column->addWidget(words(tr("Or take a sample and change it: a fictitious gas workshop, invented data"), titleFace(),
+                            false, page));
     auto *grid = new QGridLayout;
     grid->setSpacing(8);
     int place = 0;
@@ -141,14 +144,20 @@ void Welcome::paintEvent(QPaintEvent *)
 {
     QPainter painter(this);
     painter.fillRect(rect(), m_look.ground);
-    // The empty plane the first segment will be drawn on.
+    // The axes of the empty plane the first segment will be drawn on.
     const QRect plane = rect().adjusted(64, 16, -16, -44);
     painter.setPen(QPen(m_look.grid(), 1));
-    for (int x = plane.left() + 189; x < plane.right(); x += 189) painter.drawLine(x, plane.top(), x, plane.bottom());
-    for (int y = plane.bottom() - 107; y > plane.top(); y -= 107) painter.drawLine(plane.left(), y, plane.right(), y);
+    for (int x = plane.left() + 189; x < plane.right(); x += 189)
+        painter.drawLine(x, plane.bottom() - 6, x, plane.bottom());
+    for (int y = plane.bottom() - 107; y > plane.top(); y -= 107)
+        painter.drawLine(plane.left(), y, plane.left() + 6, y);
     painter.setPen(QPen(faded(m_look.ink, 0.4), 1.25));
     painter.drawLine(plane.topLeft(), plane.bottomLeft());
     painter.drawLine(plane.bottomLeft(), plane.bottomRight());
+    painter.setPen(faded(m_look.ink, 0.66));
+    drawText(painter, {38, plane.top() + 10.0}, RichText::marked(QStringLiteral("<i>p</i>")), bodyFace());
+    drawText(painter, {plane.right() - 10.0, plane.bottom() + 24.0}, RichText::marked(QStringLiteral("<i>V</i>")),
+             bodyFace());
 }
 
 } // namespace quasistat::ui
