@@ -1,4 +1,5 @@
 #include "ui/canvas/canvas.h"
+#include "ui/canvas/limit_text.h"
 #include "ui/canvas/pixel_geometry.h"
 
 #include <QSignalSpy>
@@ -119,6 +120,24 @@ private slots:
         QCOMPARE(desk.session.selected(), 1);
         QTest::mouseClick(&desk.canvas, Qt::LeftButton, {}, QPoint(900, 60));
         QCOMPARE(desk.session.selected(), -1);
+    }
+
+    void aClickOnTheFirstStateSelectsTheStart()
+    {
+        Desk desk(stroke);
+        QTest::mouseClick(&desk.canvas, Qt::LeftButton, {}, desk.handle(1));
+        QCOMPARE(desk.session.selected(), startSelected);
+        QTest::mouseClick(&desk.canvas, Qt::LeftButton, {}, desk.handle(2));
+        QCOMPARE(desk.session.selected(), 0);
+    }
+
+    void aTypedQuantityIsPrintedWithItsSigns()
+    {
+        const QChar blank(0x202F);
+        QCOMPARE(printed(QStringLiteral("50 cm3")), QStringLiteral("50") + blank + QStringLiteral("cm³"));
+        QCOMPARE(printed(QStringLiteral("-5 degC ± 1 degC")),
+                 QChar(0x2212) + QStringLiteral("5") + blank + QStringLiteral("°C"));
+        QCOMPARE(printed(QStringLiteral("11 bar(g)")), QStringLiteral("11") + blank + QStringLiteral("bar(g)"));
     }
 
     void aHandleIsHitAnywhereWithin28Pixels()

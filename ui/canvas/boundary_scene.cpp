@@ -41,9 +41,10 @@ QPolygonF forbiddenSide(const BoundaryStretch &stretch, const QPolygonF &line, c
     if (line.size() < 2) return {};
     QPolygonF area = line;
     if (isUpright(stretch)) {
+        // Beyond a volume everything is forbidden, above and below the other limits too.
         const double edge = stretch.forbiddenAbove ? plane.rect.right() : plane.rect.left();
-        area.append({edge, line.last().y()});
-        area.append({edge, line.first().y()});
+        area = QRectF(QPointF(line.first().x(), plane.rect.top()), QPointF(edge, plane.rect.bottom())).normalized();
+        area.removeLast();
     } else {
         const double edge = stretch.forbiddenAbove ? plane.rect.top() : plane.rect.bottom();
         area.append({line.last().x(), edge});

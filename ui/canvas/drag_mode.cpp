@@ -28,7 +28,7 @@ DragMode::DragMode(Canvas &canvas, int number, QPointF grabbed, QPointF now)
 void DragMode::enter()
 {
     canvas().setCursor(Qt::ClosedHandCursor);
-    canvas().session().select(std::max(0, m_number - 2));
+    canvas().session().select(segmentEndingIn(m_number));
     follow(m_now);
 }
 

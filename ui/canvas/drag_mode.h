@@ -7,6 +7,12 @@
 namespace quasistat::ui
 {
 
+/// The segment, from 0, that ends in state `number`, as a selection; the start for state 1.
+[[nodiscard]] constexpr int segmentEndingIn(int number)
+{
+    return number == 1 ? startSelected : number - 2;
+}
+
 /// A state follows the pointer along its segment's curve; released, the drag is one undo step.
 class DragMode : public Mode
 {

@@ -68,15 +68,22 @@ double withNearLimit(double highest, const std::vector<analysis::Limit> &limits,
     return raised;
 }
 
-// An interval over `pixels` that begins at zero unless the values lie in its outer part only.
-path::Interval fitted(double lowest, double highest, double pixels, double room)
+struct Fit {
+    double pixels;  ///< of the axis
+    double room;    ///< pixels kept free beyond the highest value
+    double nearest; ///< share of the highest value that the values must span for the axis to begin at zero
+};
+
+// An interval that begins at zero unless the values lie in its outer part only.
+path::Interval fitted(double lowest, double highest, const Fit &fit)
 {
     if (highest <= 0.0) return {0.0, 1.0};
     const double span = highest - lowest;
-    if (span < 1e-9 * highest || span > 0.25 * highest)
-        return {0.0, highest * pixels / std::max(pixels - room, 0.5 * pixels)};
-    const double perPixel = span / std::max(pixels - room - roomNear, 0.4 * pixels);
-    return {std::max(0.0, lowest - roomNear * perPixel), highest + room * perPixel};
+    const bool isOneValue = span < 1e-9 * highest;
+    if (isOneValue || span > fit.nearest * highest)
+        return {0.0, highest * (isOneValue ? 1.6 : fit.pixels / std::max(fit.pixels - fit.room, 0.5 * fit.pixels))};
+    const double perPixel = span / std::max(fit.pixels - fit.room - roomNear, 0.4 * fit.pixels);
+    return {std::max(0.0, lowest - roomNear * perPixel), highest + fit.room * perPixel};
 }
 
 } // namespace
@@ -86,8 +93,9 @@ View fittedView(const analysis::Evaluation &evaluation, QSizeF plot)
     const PathBounds bounds = pathBounds(evaluation.path);
     const double pressure = withNearLimit(bounds.pressure.highest(), evaluation.limits, LimitQuantity::pressure);
     const double volume = withNearLimit(bounds.volume.highest(), evaluation.limits, LimitQuantity::volume);
-    return {fitted(bounds.volume.lowest(), volume, plot.width(), roomRight),
-            fitted(bounds.pressure.lowest(), pressure, plot.height(), roomTop)};
+    const bool hasAreas = bounds.volume.highest() - bounds.volume.lowest() > 1e-6 * bounds.volume.highest();
+    return {fitted(bounds.volume.lowest(), volume, {plot.width(), roomRight, 0.25}),
+            fitted(bounds.pressure.lowest(), pressure, {plot.height(), roomTop, hasAreas ? 0.1 : 0.25})};
 }
 
 } // namespace quasistat::ui

@@ -15,18 +15,16 @@ namespace
 class LineDensity
 {
 public:
-    LineDensity(const QRectF &bounds, const std::vector<QPolygonF> &lines)
-        : m_origin(bounds.topLeft()), m_columns(static_cast<int>(bounds.width() / cell) + 2),
-          m_rows(static_cast<int>(bounds.height() / cell) + 2),
-          m_sums(static_cast<std::size_t>(m_columns) * static_cast<std::size_t>(m_rows), 0)
+    explicit LineDensity(const Occupied &occupied) : LineDensity(occupied.bounds)
     {
-        for (const auto &line : lines) add(line);
+        for (const auto &line : occupied.lines) add(line, lineWeight);
+        for (const auto &line : occupied.quiet) add(line, quietWeight);
         for (int row = 1; row < m_rows; ++row)
             for (int column = 1; column < m_columns; ++column)
                 at(column, row) += at(column - 1, row) + at(column, row - 1) - at(column - 1, row - 1);
     }
 
-    /// Length of line inside `rect`, in cells.
+    /// Length of line inside `rect`, in cells, each by its weight.
     [[nodiscard]] int inside(const QRectF &rect) const
     {
         const int left = column(rect.left()) - 1;
@@ -36,16 +34,26 @@ public:
         return at(right, bottom) - at(left, bottom) - at(right, top) + at(left, top);
     }
 
+    static constexpr int lineWeight = 4;
+    static constexpr int quietWeight = 1;
+
 private:
-    static constexpr double cell = 4.0;
+    static constexpr double cell = 3.0;
+
+    explicit LineDensity(const QRectF &bounds)
+        : m_bounds(bounds), m_columns(static_cast<int>(bounds.width() / cell) + 2),
+          m_rows(static_cast<int>(bounds.height() / cell) + 2),
+          m_sums(static_cast<std::size_t>(m_columns) * static_cast<std::size_t>(m_rows), 0)
+    {
+    }
 
     [[nodiscard]] int column(double x) const
     {
-        return std::clamp(static_cast<int>((x - m_origin.x()) / cell) + 1, 1, m_columns - 1);
+        return std::clamp(static_cast<int>((x - m_bounds.left()) / cell) + 1, 1, m_columns - 1);
     }
     [[nodiscard]] int row(double y) const
     {
-        return std::clamp(static_cast<int>((y - m_origin.y()) / cell) + 1, 1, m_rows - 1);
+        return std::clamp(static_cast<int>((y - m_bounds.top()) / cell) + 1, 1, m_rows - 1);
     }
     [[nodiscard]] int &at(int column, int row) { return m_sums[static_cast<std::size_t>(row * m_columns + column)]; }
     [[nodiscard]] int at(int column, int row) const
@@ -53,19 +61,19 @@ private:
         return m_sums[static_cast<std::size_t>(row * m_columns + column)];
     }
 
-    void add(const QPolygonF &line)
+    void add(const QPolygonF &line, int weight)
     {
         for (qsizetype i = 0; i + 1 < line.size(); ++i) {
             const QLineF piece(line.at(i), line.at(i + 1));
             const int steps = std::max(1, static_cast<int>(piece.length() / cell));
             for (int step = 0; step < steps; ++step) {
                 const QPointF point = piece.pointAt((step + 0.5) / steps);
-                ++at(column(point.x()), row(point.y()));
+                if (m_bounds.contains(point)) at(column(point.x()), row(point.y())) += weight;
             }
         }
     }
 
-    QPointF m_origin;
+    QRectF m_bounds;
     int m_columns;
     int m_rows;
     std::vector<int> m_sums;
@@ -73,24 +81,30 @@ private:
 
 // Distances of the plate from its anchor's clearance [px], nearest first.
 constexpr std::array distances{0.0, 6.0, 14.0, 24.0, 38.0, 58.0, 82.0, 112.0, 150.0, 200.0, 260.0, 330.0};
-constexpr double besideAtMost = 16.0; // farther away a label needs a leader
 constexpr int directions = 24;
 constexpr double nudge = 14.0; // a candidate that stands out of the bounds by less is moved inside
 
-constexpr double costOfLineCell = 5.0;
+constexpr double costOfLineCell = 1.0; // by its weight
 constexpr double costOfBlock = 400.0;
 constexpr double costOfDistance = 0.14;
 constexpr double costOfLeader = 5.0;
-constexpr double costOfCrossedCell = 2.0;
+constexpr double costOfCrossedCell = 4.0;
 constexpr double costOfCrossedPlate = 60.0;
 constexpr double costOfCornerOutside = 25.0; // of a label that should stand in a region
-constexpr double dear = 30.0;                // a shorter form is tried then
+constexpr double costOfDoubt = 50.0;         // of standing nearer to another thing
+constexpr double costOfLeavingRegion = 15.0;
 constexpr double unacceptable = 90.0;
 
 double overlap(const QRectF &first, const QRectF &second)
 {
     const QRectF common = first.intersected(second);
     return common.isEmpty() ? 0.0 : common.width() * common.height();
+}
+
+double distanceFrom(const QRectF &rect, QPointF point)
+{
+    return std::hypot(std::max({rect.left() - point.x(), 0.0, point.x() - rect.right()}),
+                      std::max({rect.top() - point.y(), 0.0, point.y() - rect.bottom()}));
 }
 
 bool crosses(const QLineF &line, const QRectF &rect)
@@ -117,6 +131,15 @@ QLineF leaderOf(const QRectF &plate, QPointF anchor, double clearance)
     return leader;
 }
 
+// From the middle of a rectangle of these half sides to its edge.
+QPointF ray(double angle, double halfWidth, double halfHeight)
+{
+    const double x = std::cos(angle);
+    const double y = -std::sin(angle);
+    const double reach = std::min(halfWidth / std::max(std::abs(x), 1e-9), halfHeight / std::max(std::abs(y), 1e-9));
+    return {x * reach, y * reach};
+}
+
 QRectF movedInside(QRectF plate, const QRectF &bounds)
 {
     if (plate.left() < bounds.left()) plate.moveLeft(bounds.left());
@@ -130,7 +153,7 @@ class Placement
 {
 public:
     explicit Placement(const Occupied &occupied)
-        : m_bounds(occupied.bounds), m_density(occupied.bounds, occupied.lines), m_blocks(occupied.blocks)
+        : m_bounds(occupied.bounds), m_density(occupied), m_blocks(occupied.blocks), m_things(occupied.things)
     {
     }
 
@@ -140,7 +163,7 @@ public:
         m_bestCost = std::numeric_limits<double>::infinity();
         if (!request.region.isEmpty()) tryWithin(request);
         tryAround(request, request.size, false);
-        if (request.compact && m_bestCost > dear) tryAround(request, *request.compact, true);
+        if (request.compact && m_bestCost > request.compactCost) tryAround(request, *request.compact, true);
         if (!m_best || (request.optional && m_bestCost >= unacceptable)) return std::nullopt;
         m_blocks.push_back(m_best->plate);
         if (m_best->leader) m_leaders.push_back(*m_best->leader);
@@ -151,7 +174,6 @@ private:
     struct Candidate {
         QRectF plate;
         QPointF anchor;
-        double distance = 0.0;
         double clearance = 0.0;
         bool wantsLeader = false;
         bool isCompact = false;
@@ -172,11 +194,12 @@ private:
         for (int direction = 0; direction < directions; ++direction) {
             const double angle = 2.0 * std::numbers::pi * direction / directions;
             QRectF plate(QPointF(), size);
-            plate.moveCenter(anchor + QPointF(std::cos(angle) * (size.width() / 2.0 + reach),
-                                              -std::sin(angle) * (size.height() / 2.0 + reach)));
+            plate.moveCenter(anchor + ray(angle, size.width() / 2.0 + reach, size.height() / 2.0 + reach));
             // To the right reads best; the other sides are a little dearer.
-            const double cost = distance * costOfDistance + 0.6 * (1.0 - std::cos(angle));
-            consider({plate, anchor, distance, request.clearance, distance > besideAtMost, compact}, cost);
+            double cost = distance * costOfDistance + 0.6 * (1.0 - std::cos(angle));
+            if (compact) cost += request.compactCost;
+            if (!request.region.isEmpty()) cost += costOfLeavingRegion;
+            consider({plate, anchor, request.clearance, distance > request.beside, compact}, cost);
         }
     }
 
@@ -215,10 +238,20 @@ private:
         if (candidate.wantsLeader) {
             leader = leaderOf(plate, candidate.anchor, candidate.clearance);
             cost += costOfLeader + leaderCost(*leader);
+        } else if (candidate.clearance > 0.0 && isNearerToAnother(plate, candidate.anchor)) {
+            cost += costOfDoubt;
         }
         if (cost >= m_bestCost) return;
         m_bestCost = cost;
         m_best = LabelPlace{plate, leader, candidate.isCompact};
+    }
+
+    [[nodiscard]] bool isNearerToAnother(const QRectF &plate, QPointF anchor) const
+    {
+        const double own = distanceFrom(plate, anchor);
+        return std::any_of(m_things.begin(), m_things.end(), [&](QPointF thing) {
+            return QLineF(thing, anchor).length() > 1.0 && distanceFrom(plate, thing) < own - 1.0;
+        });
     }
 
     [[nodiscard]] double leaderCost(const QLineF &leader) const
@@ -231,7 +264,8 @@ private:
         // The last stretch reaches the thing itself and does not count.
         const int steps = static_cast<int>((leader.length() - 12.0) / 8.0);
         for (int step = 0; step < steps; ++step)
-            if (m_density.inside(QRectF(leader.pointAt((step + 0.5) * 8.0 / leader.length()), QSizeF(1, 1))) > 0)
+            if (m_density.inside(QRectF(leader.pointAt((step + 0.5) * 8.0 / leader.length()), QSizeF(1, 1))) >=
+                LineDensity::lineWeight)
                 cost += costOfCrossedCell;
         return cost;
     }
@@ -239,6 +273,7 @@ private:
     QRectF m_bounds;
     LineDensity m_density;
     std::vector<QRectF> m_blocks;
+    std::vector<QPointF> m_things;
     std::vector<QLineF> m_leaders;
     std::optional<LabelPlace> m_best;
     double m_bestCost = 0.0;

@@ -17,8 +17,10 @@ struct LabelRequest {
     QSizeF size;                        ///< [px]
     std::vector<QPointF> anchors;       ///< places of the thing it belongs to, any of them will do; at least one
     double clearance = 0;               ///< [px] kept free around the anchor
+    double beside = 16.0;               ///< [px] beyond the clearance up to which it needs no leader
     QPolygonF region = {};              ///< where it should stand if it fits, without a leader
     std::optional<QSizeF> compact = {}; ///< a shorter form, taken where the whole one has no good place
+    double compactCost = 12.0;          ///< how much better the place of the shorter form must be
     double farthest = 1000.0;           ///< [px] from the anchor's clearance to the plate
     bool optional = false;              ///< left out rather than put over another label
 };
@@ -27,7 +29,9 @@ struct LabelRequest {
 struct Occupied {
     QRectF bounds;                ///< labels stay inside
     std::vector<QPolygonF> lines; ///< to be kept free where possible
+    std::vector<QPolygonF> quiet; ///< better free, but of less weight: ghosts
     std::vector<QRectF> blocks;   ///< handles, fixed labels: never covered if there is any other place
+    std::vector<QPointF> things;  ///< what labels stand for: without a leader none stands nearer to another one's
 };
 
 struct LabelPlace {

@@ -76,8 +76,8 @@ public:
     [[nodiscard]] Waiting all(const QList<LooseLabel> &beside) const
     {
         Waiting waiting;
-        addStates(waiting);
         addNet(waiting);
+        addStates(waiting);
         for (const auto &label : beside) addBoundary(waiting, label);
         addFailure(waiting);
         if (m_style.isPrint()) addSegments(waiting);
@@ -187,7 +187,13 @@ private:
                  {},
                  m_plain,
                  0.9});
-            waiting.add(text, {.size = {}, .anchors = pointsOn(drawn.line.first()), .clearance = 5.0, .optional = true},
+            waiting.add(text,
+                        {.size = {},
+                         .anchors = pointsOn(drawn.line.first()),
+                         .clearance = 5.0,
+                         .beside = 4.0,
+                         .compactCost = 70.0,
+                         .optional = true},
                         1);
         }
     }
@@ -211,7 +217,7 @@ private:
     [[nodiscard]] static std::vector<QPointF> pointsOn(const QPolygonF &line)
     {
         std::vector<QPointF> points;
-        for (const double share : {0.36, 0.64, 0.25, 0.75})
+        for (const double share : {0.36, 0.62, 0.25, 0.5, 0.75})
             points.push_back(pointAlong(line, share * lengthOf(line)).point);
         return points;
     }
@@ -230,8 +236,11 @@ private:
             const QString words = ghosts > 1 || m_style.isPrint() ? tr("reversible limit of %1").arg(drawn.index + 1)
                                                                   : tr("reversible limit");
             text.lines.append({RichText::plain(words), {}, m_plain, 0.85});
-            waiting.add(
-                text, {.size = {}, .anchors = pointsOn(drawn.limit.first()), .clearance = 5.0, .optional = ghosts > 1});
+            waiting.add(text, {.size = {},
+                               .anchors = pointsOn(drawn.limit.first()),
+                               .clearance = 5.0,
+                               .beside = 4.0,
+                               .optional = ghosts > 1});
         }
     }
 
@@ -251,7 +260,8 @@ Occupied occupied(const Scene &scene)
     result.bounds = scene.plane.rect.adjusted(4, 4, -2, -4);
     result.lines = linesOf(scene);
     for (const auto &segment : scene.segments)
-        for (const auto &piece : segment.limit) result.lines.push_back(piece);
+        for (const auto &piece : segment.limit) result.quiet.push_back(piece);
+    for (const auto &handle : scene.handles) result.things.push_back(handle.centre);
     for (const auto &handle : scene.handles)
         result.blocks.push_back(QRectF(handle.centre - QPointF(7, 7), QSizeF(14, 14)));
     for (const auto &label : scene.boundary.labels)

@@ -1,6 +1,7 @@
 #include "ui/canvas/limit_text.h"
 
 #include "core/units/display.h"
+#include "core/units/unit.h"
 
 #include <QCoreApplication>
 
@@ -61,11 +62,13 @@ QString printed(const QString &typed)
     for (const auto &mark : {QStringLiteral("±"), QStringLiteral("+/-")})
         if (const qsizetype at = text.indexOf(mark); at >= 0) text.truncate(at);
     text = text.trimmed();
-    text.replace(QLatin1Char('-'), QChar(0x2212));
-    text.replace(QStringLiteral("degC"), QStringLiteral("°C"));
-    text.replace(QStringLiteral("degF"), QStringLiteral("°F"));
-    if (const qsizetype blank = text.indexOf(QLatin1Char(' ')); blank >= 0) text[blank] = QChar(0x202F);
-    return text;
+    // The unit begins at the first character that cannot be part of a number.
+    qsizetype end = 0;
+    while (end < text.size() && QStringLiteral("+-0123456789.eE \u2212").contains(text.at(end))) ++end;
+    QString number = text.left(end).trimmed();
+    number.replace(QLatin1Char('-'), QChar(0x2212));
+    if (end == text.size()) return number;
+    return number + QChar(0x202F) + QString::fromStdString(units::printedUnit(text.mid(end).toStdString()));
 }
 
 RichText limitText(const Snapshot &snapshot, std::size_t index, bool upper)

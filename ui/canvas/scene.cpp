@@ -9,6 +9,24 @@
 namespace quasistat::ui
 {
 
+namespace
+{
+
+// Where a state's label is likely to stand: nothing else should be put there first.
+QPolygonF roomOf(const HandleScene &handle)
+{
+    constexpr double width = 44.0;
+    constexpr double height = 16.0;
+    const QPointF c = handle.centre;
+    return {{c.x() - width, c.y() - height},
+            {c.x() + width, c.y() + height},
+            c,
+            {c.x() - width, c.y() + height},
+            {c.x() + width, c.y() - height}};
+}
+
+} // namespace
+
 int Scene::handleAt(QPointF point, double reach) const
 {
     int found = -1;
@@ -54,7 +72,9 @@ Scene sceneOf(const Snapshot &snapshot, const Plane &plane, const AxisScene &axe
     addNetArea(scene, path, style);
     scene.handles = handleScenes(path, plane);
     QList<LooseLabel> beside;
-    scene.boundary = boundaryScene(snapshot, plane, style, linesOf(scene), beside);
+    std::vector<QPolygonF> avoid = linesOf(scene);
+    for (const auto &handle : scene.handles) avoid.push_back(roomOf(handle));
+    scene.boundary = boundaryScene(snapshot, plane, style, avoid, beside);
     addLabels(scene, snapshot, style, beside);
     return scene;
 }

@@ -9,6 +9,7 @@ namespace
 {
 
 constexpr double handleReach = 14.0; // a target of 28 px
+constexpr double ringReach = 6.0;
 constexpr double segmentReach = 9.0;
 constexpr double dragThreshold = 3.0;
 
@@ -55,9 +56,16 @@ void SelectMode::released(const QMouseEvent &event)
     m_isDown = false;
     if (m_isPanning) return;
     int segment = m_segment;
-    if (segment < 0 && m_handle >= 0) segment = std::max(0, stateToDrag(m_handle) - 2);
+    // The ring itself stands for its state: its segment's end, or the start.
+    if (m_handle >= 0 && (segment < 0 || isOnRing())) segment = segmentEndingIn(stateToDrag(m_handle));
     if (segment >= canvas().diagram().scene().segments.size()) segment = -1;
     canvas().session().select(segment);
+}
+
+bool SelectMode::isOnRing() const
+{
+    const QPointF centre = canvas().diagram().scene().handles.at(m_handle).centre;
+    return QLineF(centre, m_downAt).length() < ringReach;
 }
 
 void SelectMode::hover(QPointF at)

@@ -18,6 +18,7 @@ public:
 private:
     void hover(QPointF at);
     [[nodiscard]] int stateToDrag(int handle) const;
+    [[nodiscard]] bool isOnRing() const;
 
     bool m_isDown = false;
     bool m_isPanning = false;

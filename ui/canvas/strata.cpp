@@ -190,9 +190,10 @@ void paintCurves(QPainter &painter, const Painting &p)
         paintCurve(painter, segment, p.style.palette.family(segment.kind), p.style.curve, p.style.curve);
 }
 
-bool isEndOf(const HandleScene &handle, int segment)
+bool isEndOf(const HandleScene &handle, int selected)
 {
-    return segment >= 0 && (handle.states.contains(segment + 1) || handle.states.contains(segment + 2));
+    if (selected == startSelected) return handle.states.contains(1);
+    return selected >= 0 && (handle.states.contains(selected + 1) || handle.states.contains(selected + 2));
 }
 
 void paintEmphasis(QPainter &painter, const Painting &p)
