@@ -23,9 +23,6 @@ int exitCode(app::ExitStatus status)
 int window(int argc, char **argv)
 {
     QApplication application(argc, argv);
-    QApplication::setApplicationName(QStringLiteral("quasistat"));
-    QApplication::setApplicationDisplayName(QStringLiteral("Quasistat"));
-    QApplication::setOrganizationName(QStringLiteral("quasistat"));
     QApplication::setApplicationVersion(QStringLiteral(QUASISTAT_VERSION));
     const QStringList words = QApplication::arguments(); // without those that Qt takes for itself
     if (words.size() > 2)

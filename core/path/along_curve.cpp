@@ -103,11 +103,18 @@ private:
     void add(double from, double to, int halvings)
     {
         if (from == to || m_left) return;
+        // On −1…1, where the library's estimate of the error is that of the integral; on another interval it is not
+        // scaled.
+        const double middle = 0.5 * (from + to);
+        const double half = 0.5 * (to - from);
         double error = 0.0;
         double magnitude = 0.0;
-        const double part = boost::math::quadrature::gauss_kronrod<double, 21>::integrate(
-            [this](double x) { return value(x); }, from, to, 0, 0.0, &error, &magnitude);
-        const double tolerance = std::max(quadratureTolerance * std::abs(magnitude), m_floor * std::abs(to - from));
+        const double part =
+            half * boost::math::quadrature::gauss_kronrod<double, 21>::integrate(
+                       [&](double t) { return value(middle + half * t); }, -1.0, 1.0, 0, 0.0, &error, &magnitude);
+        error *= std::abs(half);
+        const double tolerance =
+            std::max(quadratureTolerance * std::abs(half * magnitude), m_floor * std::abs(to - from));
         if (error <= tolerance || m_left) {
             m_sum += part;
             return;
@@ -116,7 +123,6 @@ private:
             m_converged = false;
             return;
         }
-        const double middle = 0.5 * (from + to);
         add(from, middle, halvings + 1);
         add(middle, to, halvings + 1);
     }

@@ -31,6 +31,23 @@ TEST(ClosedForm, IsothermalWorkIsNRTLogOfVolumes)
     }
 }
 
+TEST(ClosedForm, HoldsOnTheShortestSegments)
+{
+    // The estimate of a quadrature's error must shrink with its interval, or short segments never converge.
+    for (const double change : {1e-3, 1e-5, 1e-8}) {
+        const Segment kinds[]{
+            segment(Isothermal{}, EndKey::volumeRatio, 1.0 + change),
+            segment(Polytropic{1.2}, EndKey::volumeRatio, 1.0 + change),
+            segment(Isobaric{}, EndKey::volumeRatio, 1.0 + change),
+            segment(Stepped{1, Spacing::ratio, Thermal::adiabatic}, EndKey::pressure, 1e5 / (1.0 + change))};
+        for (const Segment &kind : kinds) {
+            const auto r = PathOf{.segments = {kind}}.only();
+            EXPECT_TRUE(r.audit.ok) << change << ' ' << facts(r.kind).words;
+            EXPECT_LT(r.work, 0.0);
+        }
+    }
+}
+
 TEST(ClosedForm, IsobaricWorkAndHeat)
 {
     const auto r = PathOf{.segments = {segment(Isobaric{}, EndKey::temperature, 450.0)}}.only();

@@ -43,7 +43,7 @@ QFont runFont(const QFont &font, const Run &run)
 QString spelledIn(const QFont &font, const QString &text)
 {
     constexpr QChar narrow(0x202f);
-    if (!text.contains(narrow) || QFontMetricsF(font).inFont(narrow)) return text;
+    if (!text.contains(narrow) || QRawFont::fromFont(font).supportsCharacter(narrow)) return text;
     QString spelled = text;
     return spelled.replace(narrow, QChar(0x2009));
 }
