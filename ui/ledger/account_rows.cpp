@@ -117,7 +117,7 @@ void addRoutes(std::vector<LedgerRow> &rows, const SegmentResult &segment, int i
     rows.push_back(
         routeRow(difference, residualWords(segment.audit.firstLawResidual, segment.audit, snapshot.units), index));
     if (!quasiStatic)
-        rows.push_back(routeRow(say("lost work, two routes differ by"),
+        rows.push_back(routeRow(say("lost work, both ways"),
                                 residualWords(segment.audit.lostWorkResidual, segment.audit, snapshot.units), index));
 }
 

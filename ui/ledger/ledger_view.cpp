@@ -96,9 +96,9 @@ void LedgerView::layOut()
         if (isAccount(row)) account += row.figures;
         if (row.kind == LedgerRowKind::figure) fractions += row.figures;
     }
-    m_columnWidth = width() >= 338 ? 67.0 : 40.0;
+    m_columnWidth = std::min(67.0, (width() - 139.0) / 3.0);
     for (const QString &figure : account)
-        m_columnWidth = std::max(m_columnWidth, textWidth(figure, face(13, QFont::DemiBold)) + 12.0);
+        m_columnWidth = std::max(m_columnWidth, textWidth(figure, face(13, QFont::DemiBold)) + 8.0);
     m_decimalAt = margin + unitWidth + decimalColumn(fractions, bodyFace()).fraction;
 
     int y = 0;
