@@ -101,7 +101,7 @@ private slots:
 
     void aLoneLabelStandsBesideItsThing()
     {
-        const auto places = labelPlaces({requestAt({300, 200})}, {QRectF(0, 0, 600, 400), {}, {}});
+        const auto places = labelPlaces({requestAt({300, 200})}, {.bounds = QRectF(0, 0, 600, 400)});
         QVERIFY(places.front());
         QVERIFY(!places.front()->leader);
         QVERIFY(places.front()->plate.left() > 300.0); // to the right reads best
@@ -109,7 +109,7 @@ private slots:
 
     void labelsOfAModeratelyCrowdedCurveCoverNothing()
     {
-        Occupied occupied{QRectF(40, 10, 860, 560), {hyperbola()}, {}};
+        Occupied occupied{.bounds = QRectF(40, 10, 860, 560), .lines = {hyperbola()}};
         std::vector<LabelRequest> requests;
         for (int i = 10; i < 400; i += 32) {
             requests.push_back(requestAt(hyperbola().at(i)));
@@ -127,7 +127,7 @@ private slots:
 
     void aLabelThatHasToStandAwayHasALeaderToItsThing()
     {
-        Occupied occupied{QRectF(0, 0, 600, 400), {}, {QRectF(180, 120, 240, 160)}};
+        Occupied occupied{.bounds = QRectF(0, 0, 600, 400), .blocks = {QRectF(180, 120, 240, 160)}};
         const auto place = labelPlaces({requestAt({300, 200})}, occupied).front();
         QVERIFY(place && place->leader);
         QVERIFY(QLineF(place->leader->p2(), QPointF(300, 200)).length() < 12.0);
@@ -136,13 +136,12 @@ private slots:
     void anOptionalLabelGivesWayAndItsShortFormIsTried()
     {
         // Everything is taken but a gap that only the short form fits.
-        Occupied full{QRectF(0, 0, 200, 100), {}, {QRectF(0, 0, 200, 100)}};
+        Occupied full{.bounds = QRectF(0, 0, 200, 100), .blocks = {QRectF(0, 0, 200, 100)}};
         LabelRequest request = requestAt({100, 50});
         request.optional = true;
         QVERIFY(!labelPlaces({request}, full).front());
 
-        Occupied gap{
-            QRectF(0, 0, 200, 100), {}, {QRectF(0, 0, 200, 30), QRectF(0, 70, 200, 30), QRectF(60, 30, 50, 40)}};
+        Occupied gap{.bounds = QRectF(0, 0, 200, 100), .blocks = {QRectF(0, 0, 200, 30), QRectF(0, 70, 200, 30), QRectF(60, 30, 50, 40)}};
         request.compact = QSizeF(24, 22);
         const auto place = labelPlaces({request}, gap).front();
         QVERIFY(place && place->isCompact);
@@ -152,7 +151,7 @@ private slots:
     {
         LabelRequest request{
             .size = {120, 40}, .anchors = {{250, 180}}, .region = QPolygonF(QRectF(100, 80, 300, 200))};
-        const auto place = labelPlaces({request}, {QRectF(0, 0, 600, 400), {}, {}}).front();
+        const auto place = labelPlaces({request}, {.bounds = QRectF(0, 0, 600, 400)}).front();
         QVERIFY(place && QRectF(100, 80, 300, 200).contains(place->plate));
     }
 
