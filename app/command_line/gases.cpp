@@ -2,7 +2,7 @@
 #include "app/command_line/subcommands.h"
 #include "app/command_line/table.h"
 #include "core/document/faults.h"
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 
 #include <array>
 

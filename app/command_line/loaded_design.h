@@ -4,7 +4,7 @@
 #include "app/command_line/options.h"
 #include "app/command_line/streams.h"
 #include "core/analysis/evaluation.h"
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 
 #include <variant>
 

@@ -1,7 +1,7 @@
 #include "core/analysis/limit_figure.h"
 
 #include "core/analysis/rating.h"
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 
 namespace quasistat::analysis
 {

@@ -2,7 +2,7 @@
 // Changes to a design that keep it whole: references ("@3", {"state": 3}, regenerator) follow their state.
 
 #include "core/document/design.h"
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 #include "core/path/result.h"
 
 #include <cstddef>

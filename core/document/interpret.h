@@ -3,7 +3,7 @@
 
 #include "core/analysis/evaluation.h"
 #include "core/document/design.h"
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 #include "core/units/display.h"
 
 namespace quasistat::document

@@ -3,7 +3,7 @@
 
 #include "core/analysis/envelope.h"
 #include "core/document/fields.h"
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 #include "core/path/input.h"
 
 namespace quasistat::document

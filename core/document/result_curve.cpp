@@ -1,6 +1,6 @@
 #include "core/document/result_curve.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 
 namespace quasistat::document
 {

@@ -34,7 +34,11 @@ struct Range {
 struct Validity {
     Range valid;
     Range hard;
+    /// Published uncertainty inside and outside `valid`, in words; empty where none is known.
+    std::string uncertainty;
 };
+
+struct Equation;
 
 /// Two of its intensive properties fix a state.
 enum class Property { temperature, molarVolume, pressure, internalEnergy, enthalpy, entropy };
@@ -57,8 +61,9 @@ public:
     [[nodiscard]] virtual const Validity &validity() const = 0;
     /// Temperatures [K], ascending, where c_v may jump (seams of piecewise heat capacities): integrals are split there.
     [[nodiscard]] virtual std::span<const double> seams() const = 0;
-    /// True if p v = R T everywhere.
-    [[nodiscard]] virtual bool isIdeal() const = 0;
+    /// What makes the gas real; null if p v = R T everywhere.
+    [[nodiscard]] virtual const Equation *equation() const = 0;
+    [[nodiscard]] bool isIdeal() const { return equation() == nullptr; }
 
     [[nodiscard]] virtual std::string_view model() const = 0;  ///< key of the document: "perfect"
     [[nodiscard]] virtual std::string_view source() const = 0; ///< published source, one line

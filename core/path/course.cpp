@@ -1,6 +1,6 @@
 // Which law a quasi-static segment follows and where it ends.
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 #include "core/path/arrival.h"
 #include "core/path/end_on_law.h"
 #include "core/path/quasi_static.h"

@@ -1,6 +1,6 @@
 #include "core/path/dead_state.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 
 #include <cmath>
 

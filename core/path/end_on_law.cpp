@@ -1,6 +1,6 @@
 #include "core/path/end_on_law.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 #include "core/path/search_on_law.h"
 
 #include <cmath>

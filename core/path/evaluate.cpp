@@ -1,6 +1,6 @@
 #include "core/path/evaluate.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 #include "core/path/dead_state.h"
 #include "core/path/irreversible.h"
 #include "core/path/quasi_static.h"

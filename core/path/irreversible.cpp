@@ -1,6 +1,6 @@
 #include "core/path/irreversible.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 #include "core/path/arrival.h"
 #include "core/path/audit.h"
 #include "core/path/end_on_law.h"

@@ -1,6 +1,6 @@
 #include "core/path/quasi_static_curve.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 
 #include <cmath>
 

@@ -1,6 +1,6 @@
 #include "core/path/reversible_limit.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 #include "core/path/quasi_static.h"
 #include "core/path/sample.h"
 

@@ -1,6 +1,6 @@
 #include "core/path/slide.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 #include "core/path/end_on_law.h"
 #include "core/path/irreversible.h"
 #include "core/path/resolved_segment.h"

@@ -1,6 +1,6 @@
 #include "core/path/start.h"
 
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 
 namespace quasistat::path
 {

@@ -1,7 +1,7 @@
 #pragma once
 // Gases that many tests use.
 
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 
 #include <gtest/gtest.h>
 

@@ -1,7 +1,7 @@
 #pragma once
 // One sample on the welcome page: its path drawn small, its title and what it is about.
 
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 #include "core/path/result.h"
 #include "ui/look/palette.h"
 #include "ui/window/samples.h"

@@ -1,7 +1,7 @@
 #pragma once
 // What the window shows before there is a design: a sample to start from, a blank start state, or the pen.
 
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 #include "ui/look/palette.h"
 #include "ui/window/samples.h"
 

@@ -1,7 +1,8 @@
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 
-#include "core/gas/heat_capacity.h"
-#include "core/gas/ideal_mixture.h"
+#include "core/gas/constants.h"
+#include "core/gas/ideal/heat_capacity.h"
+#include "core/gas/ideal/ideal_mixture.h"
 
 #include <nlohmann/json.hpp>
 
@@ -160,10 +161,13 @@ Outcome<GasPtr> Library::idealGas(const Composition &composition, std::string na
 {
     std::vector<const HeatCapacity *> parts;
     std::vector<double> weights;
-    IdealMixtureFacts facts{.composition = composition,
+    IdealMixtureFacts facts{.model = "ideal",
+                            .composition = composition,
                             .molarMass = 0.0,
+                            .gasConstant = molarGasConstant,
                             .validity = {{coldestIdealPart, hottestIdealPart, std::numeric_limits<double>::infinity()},
-                                         {coldestIdealPart, hottestIdealPart, std::numeric_limits<double>::infinity()}},
+                                         {coldestIdealPart, hottestIdealPart, std::numeric_limits<double>::infinity()},
+                                         {}},
                             .name = std::move(name),
                             .source = m_data->source};
     for (const Share &share : composition) {
@@ -177,7 +181,7 @@ Outcome<GasPtr> Library::idealGas(const Composition &composition, std::string na
         valid.highestTemperature = std::min(valid.highestTemperature, species->facts.range.highestTemperature);
     }
     if (parts.empty()) return Failure{Reason::missing, "", {"a composition needs at least one gas", {}}};
-    return idealMixture(weightedSum(parts, weights), std::move(facts));
+    return idealMixture(std::make_shared<HeatCapacity>(weightedSum(parts, weights)), std::move(facts));
 }
 
 } // namespace quasistat::gas

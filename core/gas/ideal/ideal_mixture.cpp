@@ -1,4 +1,4 @@
-#include "core/gas/ideal_mixture.h"
+#include "core/gas/ideal/ideal_mixture.h"
 
 #include "core/gas/constants.h"
 
@@ -9,21 +9,12 @@ namespace quasistat::gas
 namespace
 {
 
-constexpr double R = molarGasConstant;
-
-double mixingEntropy(const Composition &composition)
-{
-    double sum = 0.0;
-    for (const Share &share : composition) sum -= share.moleFraction * std::log(share.moleFraction);
-    return R * sum;
-}
-
 class IdealMixture final : public Gas
 {
 public:
-    IdealMixture(HeatCapacity heatCapacity, IdealMixtureFacts facts)
-        : m_heatCapacity(std::move(heatCapacity)), m_facts(std::move(facts)),
-          m_mixingEntropy(mixingEntropy(m_facts.composition))
+    IdealMixture(std::shared_ptr<const IdealFunction> function, IdealMixtureFacts facts)
+        : m_function(std::move(function)), m_facts(std::move(facts)),
+          m_mixingEntropy(mixingEntropy(m_facts.composition, m_facts.gasConstant))
     {
     }
 
@@ -40,7 +31,8 @@ public:
 
     MolarState at(double temperature, double molarVolume) const override
     {
-        const IdealProperties ideal = m_heatCapacity.at(temperature);
+        const IdealProperties ideal = m_function->at(temperature);
+        const double R = m_facts.gasConstant;
         const double dpdT = R / molarVolume;
         const double pressure = dpdT * temperature;
         return {.temperature = temperature,
@@ -57,26 +49,33 @@ public:
 
     const Gas &idealPart() const override { return *this; }
     double molarMass() const override { return m_facts.molarMass; }
-    double gasConstant() const override { return R; }
+    double gasConstant() const override { return m_facts.gasConstant; }
     const Composition &composition() const override { return m_facts.composition; }
     const Validity &validity() const override { return m_facts.validity; }
-    std::span<const double> seams() const override { return m_heatCapacity.seams(); }
-    bool isIdeal() const override { return true; }
-    std::string_view model() const override { return "ideal"; }
+    std::span<const double> seams() const override { return m_function->seams(); }
+    const Equation *equation() const override { return nullptr; }
+    std::string_view model() const override { return m_facts.model; }
     std::string_view source() const override { return m_facts.source; }
     const std::string &name() const override { return m_facts.name; }
 
 private:
-    HeatCapacity m_heatCapacity;
+    std::shared_ptr<const IdealFunction> m_function;
     IdealMixtureFacts m_facts;
     double m_mixingEntropy;
 };
 
 } // namespace
 
-GasPtr idealMixture(HeatCapacity heatCapacity, IdealMixtureFacts facts)
+double mixingEntropy(const Composition &composition, double gasConstant)
 {
-    return std::make_shared<IdealMixture>(std::move(heatCapacity), std::move(facts));
+    double sum = 0.0;
+    for (const Share &share : composition) sum -= share.moleFraction * std::log(share.moleFraction);
+    return gasConstant * sum;
+}
+
+GasPtr idealMixture(std::shared_ptr<const IdealFunction> function, IdealMixtureFacts facts)
+{
+    return std::make_shared<IdealMixture>(std::move(function), std::move(facts));
 }
 
 } // namespace quasistat::gas

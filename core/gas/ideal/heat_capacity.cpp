@@ -1,4 +1,4 @@
-#include "core/gas/heat_capacity.h"
+#include "core/gas/ideal/heat_capacity.h"
 
 #include "core/gas/constants.h"
 

@@ -1,7 +1,7 @@
 // The perfect gas: p v = R T with constant heat capacities.
 
 #include "core/gas/constants.h"
-#include "core/gas/library.h"
+#include "core/gas/library/library.h"
 
 #include <cmath>
 #include <limits>
@@ -58,7 +58,7 @@ public:
     const Composition &composition() const override { return m_composition; }
     const Validity &validity() const override { return m_validity; }
     std::span<const double> seams() const override { return {}; }
-    bool isIdeal() const override { return true; }
+    const Equation *equation() const override { return nullptr; }
     std::string_view model() const override { return "perfect"; }
     std::string_view source() const override
     {
@@ -72,7 +72,7 @@ private:
     double m_cp;
     std::string m_name;
     Composition m_composition;
-    Validity m_validity{{0.0, infinity, infinity}, {0.0, infinity, infinity}};
+    Validity m_validity{{0.0, infinity, infinity}, {0.0, infinity, infinity}, {}};
 };
 
 } // namespace

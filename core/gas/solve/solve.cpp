@@ -1,4 +1,4 @@
-#include "core/gas/solve.h"
+#include "core/gas/solve/solve.h"
 
 #include "core/gas/constants.h"
 

@@ -1,6 +1,8 @@
 #pragma once
 // Ideal-gas heat capacity as a piecewise polynomial of temperature, with its integrals h and s° joined at the seams.
 
+#include "core/gas/ideal/ideal_function.h"
+
 #include <array>
 #include <vector>
 
@@ -17,14 +19,7 @@ struct HeatCapacityPiece {
     double entropyConstant = 0.0;
 };
 
-/// Ratios to R at one temperature.
-struct IdealProperties {
-    double heatCapacity; ///< c_p/R
-    double enthalpy;     ///< h/R [K], zero at 298.15 K
-    double entropy;      ///< s°/R at the reference pressure, zero at 298.15 K
-};
-
-class HeatCapacity
+class HeatCapacity final : public IdealFunction
 {
 public:
     /// Pieces that follow each other without gaps, ascending; the integration constants are set here so that h and s°
@@ -32,10 +27,10 @@ public:
     explicit HeatCapacity(std::vector<HeatCapacityPiece> pieces);
 
     /// Beyond the first and the last piece their polynomial goes on; whoever calls keeps to the range.
-    [[nodiscard]] IdealProperties at(double temperature) const;
+    [[nodiscard]] IdealProperties at(double temperature) const override;
     [[nodiscard]] const std::vector<HeatCapacityPiece> &pieces() const { return m_pieces; }
     /// Temperatures between pieces [K].
-    [[nodiscard]] const std::vector<double> &seams() const { return m_seams; }
+    [[nodiscard]] std::span<const double> seams() const override { return m_seams; }
 
 private:
     [[nodiscard]] const HeatCapacityPiece &pieceAt(double temperature) const;
