@@ -8,7 +8,7 @@ namespace
 TEST(Library, KnowsItsComponentsByNameAndFormula)
 {
     const Library &library = test::library();
-    EXPECT_EQ(library.idealComponents().size(), 47u);
+    EXPECT_EQ(library.components("ideal").size(), 47u);
     EXPECT_EQ(*library.componentName("N2"), "nitrogen");
     EXPECT_EQ(*library.componentName("carbon dioxide"), "carbon dioxide");
     EXPECT_EQ(*library.componentName("n-butane"), "n-butane");
