@@ -4,6 +4,9 @@
 #include "core/gas/equation/plan.h"
 #include "core/gas/ideal/helmholtz_ideal.h"
 #include "core/gas/ideal/ideal_mixture.h"
+#include "core/gas/library/library.h"
+#include "core/gas/phase/dew_boundary.h"
+#include "core/gas/phase/gerg_fugacities.h"
 #include "core/gas/phase/pure_saturation.h"
 
 #include <cassert>
@@ -55,26 +58,53 @@ GasPtr referenceGas(const GasData &data)
                                          .source = reference.source});
 }
 
-GasPtr gergGas(const GergMixture &mixture, const Composition &composition, const GergFacts &facts, std::string name)
+GasPtr gergGas(const GergMixture &mixture, const Composition &composition,
+               const std::vector<CriticalConstants> &critical, std::string name)
 {
-    assert(mixture.components.size() == composition.size());
+    assert(mixture.components.size() == composition.size() && critical.size() == composition.size());
+    const GergModel &model = *mixture.model;
     std::vector<double> fractions;
+    std::vector<Fugacities::Critical> guesses;
     double molarMass = 0.0;
     for (std::size_t i = 0; i < composition.size(); ++i) {
         fractions.push_back(composition[i].moleFraction);
+        guesses.push_back({critical[i].temperature, critical[i].pressure, critical[i].acentricFactor});
         molarMass += composition[i].moleFraction * mixture.components[i].molarMass;
     }
-    Equation equation{.gasConstant = facts.gasConstant,
+    const auto fugacities = std::make_shared<GergFugacities>(mixture, guesses, model.gasConstant());
+    Equation equation{.gasConstant = model.gasConstant(),
                       .ideal = helmholtzIdeal(idealTerms(mixture, fractions)),
-                      .mixingEntropy = mixingEntropy(composition, facts.gasConstant),
+                      .mixingEntropy = mixingEntropy(composition, model.gasConstant()),
                       .residual = std::make_shared<ResidualPlan>(residualTerms(mixture, fractions)),
                       .highestDensity = densestOverCritical * reducing(mixture, fractions).density};
+    equation.boundary = std::make_shared<DewBoundary>(fugacities, fractions, model.validity().hard.lowestTemperature);
     return realGas(std::move(equation), {.model = "gerg-2008",
                                          .name = std::move(name),
                                          .composition = composition,
                                          .molarMass = molarMass,
-                                         .validity = facts.validity,
-                                         .source = facts.source});
+                                         .validity = model.validity(),
+                                         .source = model.source()});
+}
+
+Outcome<GasPtr> Library::reference(std::string_view fluid) const
+{
+    const auto data = this->data(fluid, "reference");
+    if (!data) return data.failure();
+    return referenceGas(**data);
+}
+
+Outcome<GasPtr> Library::gerg2008(const Composition &composition, std::string name) const
+{
+    const auto mixture = gergMixture(composition);
+    if (!mixture) return mixture.failure();
+    std::vector<CriticalConstants> critical;
+    for (const Share &share : composition) {
+        const auto data = this->data(share.component, "gerg-2008");
+        if (!data) return data.failure();
+        assert((*data)->critical); // the files of all 21 have it
+        critical.push_back(*(*data)->critical);
+    }
+    return gergGas(*mixture, composition, critical, std::move(name));
 }
 
 } // namespace quasistat::gas
