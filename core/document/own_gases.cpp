@@ -151,7 +151,10 @@ Outcome<std::string> CubicGases::name(std::string_view typed) const
     if (m_own.contains(std::string(typed))) return std::string(typed);
     const Outcome<std::string> known = m_library->componentName(typed);
     if (known && m_own.contains(*known)) return *known;
-    return m_library->componentName(typed, gas::keyOf(m_form));
+    Outcome<std::string> name = m_library->componentName(typed, gas::keyOf(m_form));
+    if (name || !known) return name;
+    return fault(Reason::missing, "",
+                 "no heat capacity of {0} is known here: state “heat_capacity” of it under “components”", {*known});
 }
 
 Outcome<double> CubicGases::molarMass(std::string_view name) const
