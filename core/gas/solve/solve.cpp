@@ -106,14 +106,17 @@ std::optional<MolarState> realState(const Gas &gas, Given first, Given second, c
 Outcome<MolarState> insideModel(const Gas &gas, const MolarState &state)
 {
     const Range &hard = gas.validity().hard;
-    if (state.temperature < hard.lowestTemperature || state.temperature > hard.highestTemperature)
+    // A state asked for at the limit itself comes out of a solver off by its last digits.
+    constexpr double rounding = 1e-10;
+    if (state.temperature < hard.lowestTemperature * (1.0 - rounding) ||
+        state.temperature > hard.highestTemperature * (1.0 + rounding))
         return Failure{
             Reason::outsideModel,
             "",
             {"the gas would be at {0}, but its model ends at {1} and {2}",
              {Figure{Quantity::temperature, state.temperature}, Figure{Quantity::temperature, hard.lowestTemperature},
               Figure{Quantity::temperature, hard.highestTemperature}}}};
-    if (state.pressure > hard.highestPressure)
+    if (state.pressure > hard.highestPressure * (1.0 + rounding))
         return Failure{
             Reason::outsideModel,
             "",
