@@ -23,9 +23,9 @@ struct PureEquilibrium {
     std::shared_ptr<const PhaseBoundary> boundary;
 };
 
-/// `equation`: ideal and residual part; its saturation and boundary are not looked at. Solved by Newton's method in
-/// both densities for equal pressure and Gibbs energy (the linear system of R. Akasaka, J. Therm. Sci. Technol. 3
-/// (2008) 442; from memory), from the cold end up; the last millionth below T_c is interpolated.
+/// `equation`: ideal and residual part; its saturation and boundary are not looked at. Solved by Newton's method in both
+/// densities for equal pressure and Gibbs energy (the linear system of R. Akasaka, J. Therm. Sci. Technol. 3 (2008) 442;
+/// from memory), from the cold end up; the last millionth below T_c is interpolated.
 [[nodiscard]] PureEquilibrium pureEquilibrium(const Equation &equation, const PureFluid &fluid);
 
 /// A pseudo-pure fluid: its dew line from a published dew pressure p_dew(T), its bubble line from a published liquid
