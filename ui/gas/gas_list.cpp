@@ -1,0 +1,56 @@
+#include "ui/gas/gas_list.h"
+
+#include <QStringList>
+
+#include <algorithm>
+
+namespace quasistat::ui
+{
+
+namespace
+{
+
+bool isSame(const QString &a, const QString &b)
+{
+    return a.compare(b, Qt::CaseInsensitive) == 0;
+}
+
+} // namespace
+
+std::vector<GasEntry> gasesOf(std::string_view model, const gas::Library &library)
+{
+    std::vector<GasEntry> gases;
+    if (model == "perfect") return gases;
+    for (const gas::ComponentFacts &facts : library.idealComponents())
+        gases.push_back({QString::fromStdString(facts.name), QString::fromStdString(facts.formula), {}});
+    if (!gasNamed(gases, QStringLiteral("air"))) gases.push_back({QStringLiteral("air"), {}, {}});
+    std::ranges::sort(gases, {}, &GasEntry::name);
+    return gases;
+}
+
+const GasEntry *gasNamed(const std::vector<GasEntry> &gases, const QString &text)
+{
+    const QString wanted = text.trimmed();
+    if (wanted.isEmpty()) return nullptr;
+    for (const GasEntry &gas : gases)
+        if (isSame(gas.name, wanted)) return &gas;
+    const GasEntry *found = nullptr;
+    for (const GasEntry &gas : gases) {
+        const bool isAlias = gas.aliases.split(QLatin1Char('\n')).contains(wanted, Qt::CaseInsensitive);
+        if (gas.formula != wanted && !isAlias) continue;
+        if (found) return nullptr;
+        found = &gas;
+    }
+    return found;
+}
+
+QStringList gasesNear(const std::vector<GasEntry> &gases, const QString &text, int most)
+{
+    QStringList near;
+    for (int letters = std::min<int>(4, static_cast<int>(text.size())); letters >= 2 && near.isEmpty(); --letters)
+        for (const GasEntry &gas : gases)
+            if (near.size() < most && gas.name.startsWith(text.left(letters), Qt::CaseInsensitive)) near << gas.name;
+    return near;
+}
+
+} // namespace quasistat::ui
