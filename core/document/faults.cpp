@@ -1,7 +1,7 @@
 #include "core/document/faults.h"
 
-#include <algorithm>
-#include <numeric>
+#include "core/outcome/near_names.h"
+
 #include <vector>
 
 namespace quasistat::document
@@ -13,22 +13,6 @@ namespace
 Message message(std::string_view sentence, std::initializer_list<Argument> arguments)
 {
     return {.text = std::string(sentence), .arguments = {arguments.begin(), arguments.end()}};
-}
-
-/// Levenshtein distance: insertions, deletions and exchanges that turn one name into the other.
-std::size_t editDistance(std::string_view left, std::string_view right)
-{
-    std::vector<std::size_t> above(right.size() + 1);
-    std::iota(above.begin(), above.end(), std::size_t{0});
-    for (std::size_t i = 0; i < left.size(); ++i) {
-        std::vector<std::size_t> row{i + 1};
-        for (std::size_t j = 0; j < right.size(); ++j) {
-            const std::size_t exchanged = above[j] + (left[i] == right[j] ? 0 : 1);
-            row.push_back(std::min({exchanged, row[j] + 1, above[j + 1] + 1}));
-        }
-        above = std::move(row);
-    }
-    return above.empty() ? 0 : above.back();
 }
 
 } // namespace
@@ -52,13 +36,7 @@ Failure unknownName(std::string pointer, std::string_view what, std::string_view
                     std::span<const std::string_view> names)
 {
     constexpr std::size_t longestShown = 60; // a whole paragraph pasted as a name is not repeated in full
-    std::vector<std::string_view> near;
-    const std::size_t tolerated = std::max<std::size_t>(2, std::min(name.size(), longestShown) / 3);
-    if (name.size() <= longestShown)
-        std::ranges::copy_if(names, std::back_inserter(near), [&](std::string_view known) {
-            return editDistance(name, known) <= tolerated ||
-                   (name.size() > 2 && known.find(name) != std::string_view::npos);
-        });
+    const std::vector<std::string_view> near = namesNear(name, names);
     const std::string_view sentence =
         near.empty() ? "“{0}” is no {1}; known here: {2}" : "“{0}” is no {1}; did you mean {2}?";
     std::string shortened(name.substr(0, longestShown));

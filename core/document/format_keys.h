@@ -34,7 +34,8 @@ inline constexpr std::array<std::string_view, 2> endBesides{"state", "direction"
 inline constexpr std::array<std::string_view, 6> models{"perfect",   "ideal",    "peng-robinson", "soave-redlich-kwong",
                                                         "gerg-2008", "reference"};
 inline constexpr std::array<std::string_view, 4> perfectGas{"model", "name", "heat_capacity_ratio", "molar_mass"};
-inline constexpr std::array<std::string_view, 3> idealGas{"model", "composition", "composition_by_mass"};
+inline constexpr std::array<std::string_view, 3> mixture{"model", "composition", "composition_by_mass"};
+inline constexpr std::array<std::string_view, 2> referenceGas{"model", "fluid"};
 } // namespace keys
 
 /// What one kind takes beyond the keys that all of them take.

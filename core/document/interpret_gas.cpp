@@ -22,12 +22,23 @@ constexpr std::array airShares{std::pair{"nitrogen", 0.7812}, std::pair{"oxygen"
 
 using Shares = std::map<std::string, double>;
 
-/// Adds `share` of the named gas, `air` as its parts.
-Outcome<bool> addShare(Shares &shares, const std::string &name, double share, FractionBasis basis,
-                       const gas::Library &library)
+/// How the shares of a mixture are meant.
+struct Basis {
+    FractionBasis fractions;
+    std::string_view model; ///< whose gases these are
+    const gas::Library &library;
+};
+
+bool isAir(std::string_view name)
 {
-    if (name != "air") {
-        const Outcome<std::string> component = library.componentName(name);
+    return name == "air" || name == "Air";
+}
+
+/// Adds `share` of the named gas, `air` as its parts.
+Outcome<bool> addShare(Shares &shares, const std::string &name, double share, const Basis &basis)
+{
+    if (!isAir(name)) {
+        const Outcome<std::string> component = basis.library.componentName(name, basis.model);
         if (!component) return component.failure();
         const bool isNew = shares.emplace(*component, share).second;
         if (!isNew) return fault(Reason::contradiction, "", "{0} stands twice in this composition", {*component});
@@ -36,9 +47,9 @@ Outcome<bool> addShare(Shares &shares, const std::string &name, double share, Fr
     double total = 0.0;
     std::array<double, airShares.size()> weights{};
     for (std::size_t i = 0; i < airShares.size(); ++i) {
-        const Outcome<double> molarMass = library.molarMass(airShares[i].first);
+        const Outcome<double> molarMass = basis.library.molarMass(airShares[i].first, basis.model);
         if (!molarMass) return molarMass.failure();
-        weights[i] = airShares[i].second * (basis == FractionBasis::mass ? *molarMass : 1.0);
+        weights[i] = airShares[i].second * (basis.fractions == FractionBasis::mass ? *molarMass : 1.0);
         total += weights[i];
     }
     for (std::size_t i = 0; i < airShares.size(); ++i) shares[airShares[i].first] += share * weights[i] / total;
@@ -46,12 +57,12 @@ Outcome<bool> addShare(Shares &shares, const std::string &name, double share, Fr
 }
 
 /// Mole fractions from mass fractions: x_i ∝ w_i/M_i.
-Outcome<Shares> moleFractions(Shares shares, FractionBasis basis, const gas::Library &library)
+Outcome<Shares> moleFractions(Shares shares, const Basis &basis)
 {
     double total = 0.0;
     for (auto &[name, share] : shares) {
-        if (basis == FractionBasis::mass) {
-            const Outcome<double> molarMass = library.molarMass(name);
+        if (basis.fractions == FractionBasis::mass) {
+            const Outcome<double> molarMass = basis.library.molarMass(name, basis.model);
             if (!molarMass) return molarMass.failure();
             share /= *molarMass;
         }
@@ -88,28 +99,67 @@ Outcome<gas::GasPtr> perfectFrom(const Fields &fields, Warnings &warnings)
     return gas;
 }
 
-Outcome<gas::GasPtr> idealFrom(const Fields &fields, const gas::Library &library, Warnings &warnings)
+/// A composition and the place it stands at.
+struct PlacedComposition {
+    Place place;
+    gas::Composition composition;
+};
+
+/// `composition` or `composition_by_mass` of a gas that has no other keys.
+Outcome<PlacedComposition> mixtureFrom(const Fields &fields, std::string_view model, const gas::Library &library,
+                                       Warnings &warnings)
 {
-    fields.warnOfUnknown({keys::idealGas}, warnings);
+    fields.warnOfUnknown({keys::mixture}, warnings);
     const bool byMass = fields.has("composition_by_mass");
     if (byMass && fields.has("composition"))
         return fault(Reason::contradiction, fields.pointerTo("composition_by_mass"),
                      "“composition” and “composition_by_mass” exclude each other: remove one");
     const Outcome<Place> place = fields.required(byMass ? "composition_by_mass" : "composition");
     if (!place) return place.failure();
-    const Outcome<gas::Composition> composition =
-        compositionFrom(*place, byMass ? FractionBasis::mass : FractionBasis::amount, library, warnings);
+    Outcome<gas::Composition> composition =
+        compositionFrom(*place, byMass ? FractionBasis::mass : FractionBasis::amount, model, library, warnings);
     if (!composition) return composition.failure();
-    Outcome<gas::GasPtr> gas = library.idealGas(*composition, mixtureName(*composition, library));
+    return PlacedComposition{*place, std::move(*composition)};
+}
+
+Outcome<gas::GasPtr> idealFrom(const Fields &fields, const gas::Library &library, Warnings &warnings)
+{
+    const Outcome<PlacedComposition> mixture = mixtureFrom(fields, "ideal", library, warnings);
+    if (!mixture) return mixture.failure();
+    Outcome<gas::GasPtr> gas = library.idealGas(mixture->composition, mixtureName(mixture->composition));
+    if (!gas) return at(mixture->place.pointer, gas.failure());
+    return gas;
+}
+
+Outcome<gas::GasPtr> gergFrom(const Fields &fields, const gas::Library &library, Warnings &warnings)
+{
+    const Outcome<PlacedComposition> mixture = mixtureFrom(fields, "gerg-2008", library, warnings);
+    if (!mixture) return mixture.failure();
+    Outcome<gas::GasPtr> gas = library.gerg2008(mixture->composition, mixtureName(mixture->composition));
+    if (!gas) return at(mixture->place.pointer, gas.failure());
+    return gas;
+}
+
+Outcome<gas::GasPtr> referenceGasFrom(const Fields &fields, const gas::Library &library, Warnings &warnings)
+{
+    fields.warnOfUnknown({keys::referenceGas}, warnings);
+    const Outcome<Place> place = fields.required("fluid");
+    if (!place) return place.failure();
+    const Outcome<std::string> fluid = textAt(*place);
+    if (!fluid) return fluid.failure();
+    const Outcome<std::string> name = library.componentName(*fluid, "reference");
+    if (!name) return at(place->pointer, name.failure());
+    Outcome<gas::GasPtr> gas = library.reference(*name);
     if (!gas) return at(place->pointer, gas.failure());
     return gas;
 }
 
 } // namespace
 
-Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis basis, const gas::Library &library,
-                                          Warnings &warnings)
+Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis fractionBasis, std::string_view model,
+                                          const gas::Library &library, Warnings &warnings)
 {
+    const Basis basis{fractionBasis, model, library};
     const Outcome<Fields> fields = Fields::of(place);
     if (!fields) return fields.failure();
     Shares shares;
@@ -118,7 +168,7 @@ Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis basi
         const Place entry{&item.value(), fields->pointerTo(item.key())};
         const Outcome<double> fraction = fractionAt(entry);
         if (!fraction) return fraction.failure();
-        const Outcome<bool> added = addShare(shares, item.key(), *fraction, basis, library);
+        const Outcome<bool> added = addShare(shares, item.key(), *fraction, basis);
         if (!added) return at(entry.pointer, added.failure());
         sum += *fraction;
     }
@@ -128,7 +178,7 @@ Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis basi
     if (std::abs(sum - 1.0) > rounding)
         warnings.push_back(
             remark(place.pointer, "these fractions sum to {0} and are divided by it", {fmt::format("{:.8g}", sum)}));
-    Outcome<Shares> fractions = moleFractions(std::move(shares), basis, library);
+    Outcome<Shares> fractions = moleFractions(std::move(shares), basis);
     if (!fractions) return at(place.pointer, fractions.failure());
     gas::Composition composition;
     for (const auto &[name, share] : *fractions)
@@ -136,16 +186,14 @@ Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis basi
     return composition;
 }
 
-std::string mixtureName(const gas::Composition &composition, const gas::Library &library)
+std::string mixtureName(const gas::Composition &composition)
 {
     if (composition.size() == 1) return composition.front().component;
-    Shares air;
-    const bool isKnown = addShare(air, "air", 1.0, FractionBasis::amount, library).ok();
     const auto isAirShare = [&](const gas::Share &share) {
-        const auto found = air.find(share.component);
-        return found != air.end() && std::abs(found->second - share.moleFraction) < 1e-9;
+        const auto part = std::ranges::find(airShares, share.component, [](const auto &p) { return p.first; });
+        return part != airShares.end() && std::abs(part->second - share.moleFraction) < 1e-9;
     };
-    if (isKnown && composition.size() == air.size() && std::ranges::all_of(composition, isAirShare)) return "air";
+    if (composition.size() == airShares.size() && std::ranges::all_of(composition, isAirShare)) return "air";
 
     gas::Composition sorted = composition;
     std::ranges::stable_sort(sorted, std::greater<>{}, &gas::Share::moleFraction);
@@ -169,6 +217,8 @@ Outcome<gas::GasPtr> gasFrom(const Place &place, const gas::Library &library, Wa
     if (!model) return model.failure();
     if (*model == "perfect") return perfectFrom(*fields, warnings);
     if (*model == "ideal") return idealFrom(*fields, library, warnings);
+    if (*model == "gerg-2008") return gergFrom(*fields, library, warnings);
+    if (*model == "reference") return referenceGasFrom(*fields, library, warnings);
     if (std::ranges::find(keys::models, *model) != keys::models.end())
         return notComputed(modelPlace->pointer, "the gas model “" + *model + "”");
     return unknownName(modelPlace->pointer, "gas model", *model, keys::models);

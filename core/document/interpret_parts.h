@@ -16,10 +16,11 @@ using Warnings = std::vector<Warning>;
 /// A composition by mole fractions or by mass, sorted by name, fractions summing to 1 (Reason::contradiction where they
 /// are further from it than 1e-4; normalised with a warning else).
 enum class FractionBasis { amount, mass };
-[[nodiscard]] Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis basis,
+/// `model`: whose gases and molar masses.
+[[nodiscard]] Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis basis, std::string_view model,
                                                         const gas::Library &library, Warnings &warnings);
 /// "air", the single component's name, else "nitrogen 0.70, oxygen 0.30" with the largest share first.
-[[nodiscard]] std::string mixtureName(const gas::Composition &composition, const gas::Library &library);
+[[nodiscard]] std::string mixtureName(const gas::Composition &composition);
 
 /// Absent: the default of the format.
 [[nodiscard]] Outcome<path::Surroundings> surroundingsFrom(const std::optional<Place> &place, Warnings &warnings);

@@ -24,6 +24,7 @@ enum class Reason {
     ambiguous,     ///< more than one answer; the user must choose
     undetermined,  ///< the end does not depend on where the segment stops
     outsideModel,  ///< beyond the hard limits of the gas model
+    condenses,     ///< the gas would be in two phases, which its model does not compute
     notConverged,  ///< a numerical method gave up; never expected, always reported
     notReached,    ///< an earlier segment failed, so this one has no start
     unreadable,    ///< a file cannot be read

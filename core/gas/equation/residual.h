@@ -48,7 +48,7 @@ public:
     virtual void atEach(std::span<const double> temperatures, std::span<const double> densities,
                         std::span<Alpha> results) const;
 
-    [[nodiscard]] Alpha at(double temperature, double density) const;
+    [[nodiscard]] virtual Alpha at(double temperature, double density) const;
 };
 
 } // namespace quasistat::gas

@@ -39,8 +39,7 @@ struct DepartureTerm {
     double gamma;
 };
 
-/// n δᵈ τᵗ exp(−η(δ − ε)² + 1/(β(τ − γ)² + b)), η stored with the sign that makes the exponent of δ η(δ − ε)²:
-/// negative in the published set. Source: K. Gao et al., J. Phys. Chem. Ref. Data 52 (2023) 013102.
+/// n δᵈ τᵗ exp(η(δ − ε)² + 1/(β(τ − γ)² + b)), η < 0. Source: K. Gao et al., J. Phys. Chem. Ref. Data 52 (2023) 013102.
 struct AssociatingTerm {
     double n;
     int d;

@@ -3,7 +3,6 @@
 
 #include "core/gas/equation/terms.h"
 #include "core/gas/gas.h"
-#include "core/gas/ideal/heat_capacity.h"
 
 #include <array>
 #include <optional>
@@ -33,7 +32,7 @@ struct IdealGasData {
 
 /// One first guess of a saturation property. Source: the data file; accuracy `dev_max` there.
 struct Ancillary {
-    bool isLinear; ///< y_r (1 + Σ n θᵗ), else y_r exp(k Σ n θᵗ), θ = 1 − T/T_r
+    bool isLinear;     ///< y_r (1 + Σ n θᵗ), else y_r exp(k Σ n θᵗ), θ = 1 − T/T_r
     bool hasTauFactor; ///< k = T_r/T, else 1
     double reducingTemperature;
     double reducingValue;
@@ -50,7 +49,7 @@ struct ReferenceData {
     double criticalTemperature; ///< of the equation itself where the file gives it, as are the next two
     double criticalPressure;
     double criticalDensity;
-    IdealTerms ideal; ///< as published: h and s zeros of the source
+    IdealTerms ideal;        ///< as published: h and s zeros of the source
     double idealEnthalpy298; ///< [J/mol] at 298.15 K in the source's zero
     double idealEntropy298;  ///< [J/(mol K)] at 298.15 K, 101325 Pa in the source's zero
     ResidualTerms residual;

@@ -1,86 +1,26 @@
 #include "core/gas/library/library.h"
 
 #include "core/gas/constants.h"
-#include "core/gas/ideal/heat_capacity.h"
 #include "core/gas/ideal/ideal_mixture.h"
-
-#include <nlohmann/json.hpp>
+#include "core/gas/library/ideal_part.h"
+#include "core/outcome/near_names.h"
 
 #include <algorithm>
 #include <cctype>
 #include <limits>
-
-namespace quasistat::resources
-{
-std::string_view nasaPolynomials();
-}
 
 namespace quasistat::gas
 {
 namespace
 {
 
-/// Hard limits of every ideal part (format of the document, "gas"): beyond them there is no answer.
-constexpr double coldestIdealPart = 50.0;
-constexpr double hottestIdealPart = 6000.0;
-
-struct Species {
-    ComponentFacts facts;
-    HeatCapacity heatCapacity;
-};
+using DataPtr = std::shared_ptr<const GasData>;
 
 std::string lowerCase(std::string_view text)
 {
     std::string result(text);
-    std::transform(result.begin(), result.end(), result.begin(),
-                   [](unsigned char c) { return static_cast<char>(std::tolower(c)); });
+    std::ranges::transform(result, result.begin(), [](unsigned char c) { return static_cast<char>(std::tolower(c)); });
     return result;
-}
-
-/// "R14 (tetrafluoromethane)" → "tetrafluoromethane"; "Nitrogen" → "nitrogen".
-std::string canonicalName(std::string_view published)
-{
-    const auto open = published.find('(');
-    const auto close = published.rfind(')');
-    if (open != std::string_view::npos && close != std::string_view::npos && open < close)
-        return lowerCase(published.substr(open + 1, close - open - 1));
-    return lowerCase(published);
-}
-
-double heatCapacityAt(const std::array<double, 5> &a, double t)
-{
-    return a[0] + t * (a[1] + t * (a[2] + t * (a[3] + t * a[4])));
-}
-
-/// The published rows between the constants that carry them on to the hard limits.
-HeatCapacity heatCapacityOf(const std::vector<double> &limits, const std::vector<std::array<double, 5>> &rows)
-{
-    std::vector<HeatCapacityPiece> pieces;
-    const double coldest = limits.front();
-    const double hottest = limits.back();
-    if (coldest > coldestIdealPart)
-        pieces.push_back({.from = coldestIdealPart, .to = coldest, .a = {heatCapacityAt(rows.front(), coldest)}});
-    for (std::size_t i = 0; i < rows.size(); ++i)
-        pieces.push_back({.from = limits[i], .to = limits[i + 1], .a = rows[i]});
-    if (hottest < hottestIdealPart)
-        pieces.push_back({.from = hottest, .to = hottestIdealPart, .a = {heatCapacityAt(rows.back(), hottest)}});
-    return HeatCapacity(std::move(pieces));
-}
-
-Species speciesFrom(const nlohmann::json &entry)
-{
-    const auto limits = entry.at("ranges").get<std::vector<double>>();
-    std::vector<std::array<double, 5>> rows;
-    for (const auto &row : entry.at("coefficients")) {
-        std::array<double, 5> a{};
-        for (std::size_t k = 0; k < a.size(); ++k) a[k] = row.at(k).get<double>();
-        rows.push_back(a); // rows 6 and 7 only place the zeros of h and s, which are ours to place
-    }
-    return {.facts = {.name = canonicalName(entry.at("name").get<std::string>()),
-                      .formula = entry.at("formula").get<std::string>(),
-                      .molarMass = entry.at("M").get<double>(),
-                      .range = {limits.front(), limits.back(), std::numeric_limits<double>::infinity()}},
-            .heatCapacity = heatCapacityOf(limits, rows)};
 }
 
 std::string joined(const std::vector<std::string> &names)
@@ -90,98 +30,177 @@ std::string joined(const std::vector<std::string> &names)
     return text;
 }
 
+bool isAlias(const GasData &data, const std::string &lower)
+{
+    return std::ranges::any_of(data.aliases, [&](const std::string &alias) { return lowerCase(alias) == lower; });
+}
+
+bool hasIdealPart(const DataPtr &data)
+{
+    return data->idealGas || data->reference || data->gerg;
+}
+
+/// A sentence repeats what was typed, but not a whole paragraph pasted by mistake.
+std::string shown(std::string_view name)
+{
+    constexpr std::size_t longestShown = 60;
+    if (name.size() <= longestShown) return std::string(name);
+    std::size_t end = longestShown;
+    while (end > 0 && (static_cast<unsigned char>(name[end]) & 0xC0) == 0x80) --end; // whole characters of UTF-8
+    return std::string(name.substr(0, end)) + "…";
+}
+
 } // namespace
 
-struct Library::Data {
-    std::vector<Species> species;
-    std::vector<ComponentFacts> facts;
-    std::string source;
-
-    [[nodiscard]] const Species *find(std::string_view name) const
-    {
-        const auto it =
-            std::find_if(species.begin(), species.end(), [&](const Species &s) { return s.facts.name == name; });
-        return it == species.end() ? nullptr : &*it;
-    }
-};
-
-Library::Library()
-{
-    const auto json = nlohmann::json::parse(resources::nasaPolynomials());
-    auto data = std::make_unique<Data>();
-    for (const auto &entry : json.at("species")) data->species.push_back(speciesFrom(entry));
-    for (const Species &species : data->species) data->facts.push_back(species.facts);
-    data->source = "heat capacities: B. J. McBride, S. Gordon, M. A. Reno, NASA Technical Memorandum 4513 (1993)";
-    m_data = std::move(data);
-}
+Library::Library() : m_store(std::make_unique<GasStore>()) {}
 
 Library::~Library() = default;
 
-const std::vector<ComponentFacts> &Library::idealComponents() const
+std::vector<DataPtr> Library::gases(std::string_view model) const
 {
-    return m_data->facts;
+    std::vector<DataPtr> list;
+    for (const std::string &name : gasNames())
+        if (DataPtr data = m_store->find(name); model.empty() || isIn(model, *data)) list.push_back(std::move(data));
+    return list;
 }
 
-Failure Library::unknown(std::string_view name) const
+std::vector<ComponentFacts> Library::components(std::string_view model) const
 {
+    std::vector<ComponentFacts> list;
+    for (const DataPtr &data : gases(model)) list.push_back(*factsIn(model, *data, *m_store));
+    return list;
+}
+
+Failure Library::unknown(std::string_view name, std::string_view model) const
+{
+    std::vector<std::string_view> names;
+    const std::vector<DataPtr> known = gases(model);
+    for (const DataPtr &data : known) names.emplace_back(data->name);
     std::vector<std::string> near;
-    for (const ComponentFacts &facts : m_data->facts)
-        if (!name.empty() && facts.name.starts_with(lowerCase(name.substr(0, 2)))) near.push_back(facts.name);
+    for (const std::string_view candidate : namesNear(lowerCase(name), names)) near.emplace_back(candidate);
     if (near.empty())
         return {Reason::unknownName,
                 "",
-                {"there is no gas named “{0}” here; `quasistat gases` lists them all", {std::string(name)}}};
+                {"there is no gas named “{0}” here; `quasistat gases` lists them all", {shown(name)}}};
+    return {
+        Reason::unknownName, "", {"there is no gas named “{0}” here; near it are: {1}", {shown(name), joined(near)}}};
+}
+
+Failure Library::elsewhere(const GasData &data, std::string_view model) const
+{
+    std::vector<std::string> having;
+    for (const std::string_view other : modelsOfGases())
+        if (isIn(other, data)) having.emplace_back(other);
+    if (having.empty())
+        return {
+            Reason::unknownName,
+            "",
+            {"the model {0} does not have {1}: no heat capacity is known of it here", {std::string(model), data.name}}};
     return {Reason::unknownName,
             "",
-            {"there is no gas named “{0}” here; near it are: {1}", {std::string(name), joined(near)}}};
+            {"the model {0} does not have {1}; these do: {2}", {std::string(model), data.name, joined(having)}}};
 }
 
-Outcome<std::string> Library::componentName(std::string_view nameOrFormula) const
+Outcome<std::string> Library::componentName(std::string_view nameFormulaOrAlias) const
 {
-    if (const Species *species = m_data->find(lowerCase(nameOrFormula))) return species->facts.name;
-    std::vector<std::string> sameFormula;
-    for (const ComponentFacts &facts : m_data->facts)
-        if (facts.formula == nameOrFormula) sameFormula.push_back(facts.name);
-    if (sameFormula.size() == 1) return sameFormula.front();
-    if (sameFormula.size() > 1)
-        return Failure{Reason::ambiguous,
-                       "",
-                       {"the formula {0} stands for more than one gas: write {1}",
-                        {std::string(nameOrFormula), joined(sameFormula)}}};
-    return unknown(nameOrFormula);
+    return componentName(nameFormulaOrAlias, {});
 }
 
-Outcome<double> Library::molarMass(std::string_view component) const
+Outcome<std::string> Library::componentName(std::string_view nameFormulaOrAlias, std::string_view model) const
 {
-    if (const Species *species = m_data->find(component)) return species->facts.molarMass;
-    return unknown(component);
+    const std::string lower = lowerCase(nameFormulaOrAlias);
+    // By its name no other file is read.
+    if (const DataPtr data = m_store->find(lower)) {
+        if (model.empty() || isIn(model, *data)) return data->name;
+        return elsewhere(*data, model);
+    }
+    std::vector<DataPtr> meant;
+    for (const DataPtr &data : gases({}))
+        if (data->formula == nameFormulaOrAlias || isAlias(*data, lower)) meant.push_back(data);
+    if (meant.empty()) return unknown(nameFormulaOrAlias, model);
+
+    const DataPtr example = meant.front();
+    if (model.empty()) {
+        // H2 is hydrogen, though parahydrogen is known by its critical constants.
+        if (std::ranges::any_of(meant, hasIdealPart))
+            std::erase_if(meant, [](const DataPtr &data) { return !hasIdealPart(data); });
+    } else {
+        std::erase_if(meant, [&](const DataPtr &data) { return !isIn(model, *data); });
+    }
+    if (meant.empty()) return elsewhere(*example, model);
+    if (meant.size() == 1) return meant.front()->name;
+    std::vector<std::string> names;
+    for (const DataPtr &data : meant) names.push_back(data->name);
+    return Failure{
+        Reason::ambiguous,
+        "",
+        {"the formula {0} stands for more than one gas: write {1}", {std::string(nameFormulaOrAlias), joined(names)}}};
+}
+
+Outcome<DataPtr> Library::data(std::string_view component) const
+{
+    if (DataPtr data = m_store->find(component)) return data;
+    return unknown(component, {});
+}
+
+Outcome<DataPtr> Library::data(std::string_view component, std::string_view model) const
+{
+    DataPtr data = m_store->find(component);
+    if (!data) return unknown(component, model);
+    if (!isIn(model, *data)) return elsewhere(*data, model);
+    return data;
+}
+
+Outcome<double> Library::molarMass(std::string_view component, std::string_view model) const
+{
+    const Outcome<DataPtr> found = data(component, model);
+    if (!found) return found.failure();
+    return molarMassIn(model, **found);
 }
 
 Outcome<GasPtr> Library::idealGas(const Composition &composition, std::string name) const
 {
-    std::vector<const HeatCapacity *> parts;
+    constexpr Range everywhere{coldestIdealPart, hottestIdealPart, std::numeric_limits<double>::infinity()};
+    std::vector<HeatCapacity> functions;
     std::vector<double> weights;
     IdealMixtureFacts facts{.model = "ideal",
                             .composition = composition,
                             .molarMass = 0.0,
                             .gasConstant = molarGasConstant,
-                            .validity = {{coldestIdealPart, hottestIdealPart, std::numeric_limits<double>::infinity()},
-                                         {coldestIdealPart, hottestIdealPart, std::numeric_limits<double>::infinity()},
-                                         {}},
+                            .validity = {everywhere, everywhere, {}},
                             .name = std::move(name),
-                            .source = m_data->source};
+                            .source = {}};
     for (const Share &share : composition) {
-        const Species *species = m_data->find(share.component);
-        if (!species) return unknown(share.component);
-        parts.push_back(&species->heatCapacity);
+        const Outcome<DataPtr> found = data(share.component, "ideal");
+        if (!found) return found.failure();
+        const IdealGasData &ideal = *(*found)->idealGas;
+        functions.push_back(heatCapacityOf(ideal));
         weights.push_back(share.moleFraction);
-        facts.molarMass += share.moleFraction * species->facts.molarMass;
+        facts.molarMass += share.moleFraction * ideal.molarMass;
         Range &valid = facts.validity.valid;
-        valid.lowestTemperature = std::max(valid.lowestTemperature, species->facts.range.lowestTemperature);
-        valid.highestTemperature = std::min(valid.highestTemperature, species->facts.range.highestTemperature);
+        valid.lowestTemperature = std::max(valid.lowestTemperature, ideal.limits.front());
+        valid.highestTemperature = std::min(valid.highestTemperature, ideal.limits.back());
+        if (facts.source.find(ideal.source) == std::string::npos)
+            facts.source += (facts.source.empty() ? "heat capacities: " : "; ") + ideal.source;
     }
-    if (parts.empty()) return Failure{Reason::missing, "", {"a composition needs at least one gas", {}}};
+    if (functions.empty()) return Failure{Reason::missing, "", {"a composition needs at least one gas", {}}};
+    std::vector<const HeatCapacity *> parts;
+    for (const HeatCapacity &function : functions) parts.push_back(&function);
     return idealMixture(std::make_shared<HeatCapacity>(weightedSum(parts, weights)), std::move(facts));
+}
+
+Outcome<GergMixture> Library::gergMixture(const Composition &composition) const
+{
+    std::vector<std::string> names;
+    std::vector<GergComponent> components;
+    for (const Share &share : composition) {
+        const Outcome<DataPtr> found = data(share.component, "gerg-2008");
+        if (!found) return found.failure();
+        names.push_back(share.component);
+        components.push_back(*(*found)->gerg);
+    }
+    if (names.empty()) return Failure{Reason::missing, "", {"a composition needs at least one gas", {}}};
+    return quasistat::gas::gergMixture(m_store->gergModel(), names, std::move(components));
 }
 
 } // namespace quasistat::gas

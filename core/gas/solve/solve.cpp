@@ -1,10 +1,13 @@
 #include "core/gas/solve/solve.h"
 
 #include "core/gas/constants.h"
+#include "core/gas/equation/equation.h"
+#include "core/gas/phase/dew_point.h"
+#include "core/gas/solve/density.h"
+#include "core/gas/solve/equilibrium.h"
+#include "core/gas/solve/newton.h"
 
-#include <algorithm>
 #include <cmath>
-#include <optional>
 
 namespace quasistat::gas
 {
@@ -12,110 +15,6 @@ namespace
 {
 
 using units::Quantity;
-
-/// Newton's error after a step of this size is below rounding (it squares), so the stepped-to point is final.
-constexpr double lastStep = 1e-8;
-constexpr int mostSteps = 100;
-/// Longest steps in ln T and ln v: far enough for any start, short enough to stay where the linearisation means
-/// something.
-constexpr double longestTemperatureStep = 1.0;
-constexpr double longestVolumeStep = 5.0;
-
-Quantity quantityOf(Property property)
-{
-    switch (property) {
-    case Property::temperature: return Quantity::temperature;
-    case Property::pressure: return Quantity::pressure;
-    case Property::entropy: return Quantity::molarEntropy;
-    case Property::internalEnergy:
-    case Property::enthalpy: return Quantity::molarEnergy;
-    case Property::molarVolume: return Quantity::number;
-    }
-    return Quantity::number;
-}
-
-std::string wordsOf(Property property)
-{
-    switch (property) {
-    case Property::temperature: return "temperature";
-    case Property::pressure: return "pressure";
-    case Property::entropy: return "molar entropy";
-    case Property::internalEnergy: return "molar internal energy";
-    case Property::enthalpy: return "molar enthalpy";
-    case Property::molarVolume: return "molar volume [m³/mol]";
-    }
-    return {};
-}
-
-Failure noState(Given first, Given second)
-{
-    return {Reason::unreachable,
-            "",
-            {"the gas has no state with {0} {1} and {2} {3}",
-             {wordsOf(first.property), Figure{quantityOf(first.property), first.value}, wordsOf(second.property),
-              Figure{quantityOf(second.property), second.value}}}};
-}
-
-/// A residual that is of order one when the property is off by its own size, with its slopes in ln T and ln v.
-struct Residual {
-    double value;
-    double slopeT;
-    double slopeV;
-};
-
-Residual residual(const MolarState &s, Given given, double gasConstant)
-{
-    const double T = s.temperature;
-    const double v = s.molarVolume;
-    const double RT = gasConstant * T;
-    switch (given.property) {
-    case Property::temperature: return {std::log(T / given.value), 1.0, 0.0};
-    case Property::molarVolume: return {std::log(v / given.value), 0.0, 1.0};
-    case Property::pressure:
-        if (s.pressure > 0.0)
-            return {std::log(s.pressure / given.value), T * s.dpdT / s.pressure, v * s.dpdv / s.pressure};
-        return {(s.pressure - given.value) / given.value, T * s.dpdT / given.value, v * s.dpdv / given.value};
-    case Property::entropy:
-        return {(s.entropy - given.value) / gasConstant, s.isochoricHeatCapacity / gasConstant,
-                v * s.dpdT / gasConstant};
-    case Property::internalEnergy:
-        return {(s.internalEnergy - given.value) / RT, s.isochoricHeatCapacity / gasConstant,
-                v * (T * s.dpdT - s.pressure) / RT};
-    case Property::enthalpy:
-        return {(s.enthalpy - given.value) / RT, (s.isochoricHeatCapacity + v * s.dpdT) / gasConstant,
-                v * (T * s.dpdT + v * s.dpdv) / RT};
-    }
-    return {};
-}
-
-struct Step {
-    double lnT;
-    double lnV;
-};
-
-/// The Newton step of both unknowns; none where the two conditions are parallel.
-std::optional<Step> newtonStep(const Residual &a, const Residual &b)
-{
-    const double determinant = a.slopeT * b.slopeV - a.slopeV * b.slopeT;
-    const double scale = (std::abs(a.slopeT) + std::abs(a.slopeV)) * (std::abs(b.slopeT) + std::abs(b.slopeV));
-    if (!(std::abs(determinant) > 1e-14 * scale)) return std::nullopt;
-    return Step{(-a.value * b.slopeV + b.value * a.slopeV) / determinant,
-                (-b.value * a.slopeT + a.value * b.slopeT) / determinant};
-}
-
-Step shortened(Step step)
-{
-    const double shrink =
-        std::min({1.0, longestTemperatureStep / std::abs(step.lnT), longestVolumeStep / std::abs(step.lnV)});
-    return {step.lnT * shrink, step.lnV * shrink};
-}
-
-std::optional<double> valueOf(Property property, Given first, Given second)
-{
-    if (first.property == property) return first.value;
-    if (second.property == property) return second.value;
-    return std::nullopt;
-}
 
 /// Whether the two properties of an ideal gas both depend on temperature alone.
 bool areBothThermal(Given first, Given second)
@@ -134,6 +33,69 @@ bool isPositiveWhereItMustBe(Given given)
     return !mustBePositive || given.value > 0.0;
 }
 
+/// An ideal gas by p and v or p and T, from p v = R T without iteration.
+std::optional<MolarState> idealFromPressure(const Gas &gas, Given first, Given second)
+{
+    const auto p = valueOf(Property::pressure, first, second);
+    if (!p) return std::nullopt;
+    if (const auto v = valueOf(Property::molarVolume, first, second)) return gas.at(*p * *v / gas.gasConstant(), *v);
+    if (const auto T = valueOf(Property::temperature, first, second)) return gas.at(*T, gas.gasConstant() * *T / *p);
+    return std::nullopt;
+}
+
+Place firstGuess(const Gas &gas, Given first, Given second, const MolarState *guess)
+{
+    const double temperature =
+        valueOf(Property::temperature, first, second).value_or(guess ? guess->temperature : referenceTemperature);
+    if (const auto v = valueOf(Property::molarVolume, first, second)) return {temperature, *v};
+    if (guess) return {temperature, guess->molarVolume};
+    const double pressure = valueOf(Property::pressure, first, second).value_or(referencePressure);
+    return {temperature, gas.gasConstant() * temperature / pressure};
+}
+
+std::optional<MolarState> idealState(const Gas &gas, Given first, Given second, const MolarState *guess)
+{
+    if (areBothThermal(first, second)) return std::nullopt;
+    if (const auto state = idealFromPressure(gas, first, second)) return state;
+    return newton(gas, first, second, firstGuess(gas, first, second, guess));
+}
+
+bool isOnEquilibriumSurface(const Equation &equation, const MolarState &state)
+{
+    return !equation.boundary || !isTwoPhase(*equation.boundary, state.temperature, state.molarVolume);
+}
+
+/// The place where the search for a real gas begins: the neighbour, or where the ideal gas would be.
+Place realStart(const Gas &gas, Given first, Given second, const MolarState *guess)
+{
+    if (!guess)
+        if (const auto ideal = idealState(gas.idealPart(), first, second, nullptr))
+            return {ideal->temperature, ideal->molarVolume};
+    return firstGuess(gas, first, second, guess);
+}
+
+std::optional<MolarState> realState(const Gas &gas, Given first, Given second, const MolarState *guess)
+{
+    const Equation &equation = *gas.equation();
+    const auto T = valueOf(Property::temperature, first, second);
+    if (T) {
+        if (const auto v = valueOf(Property::molarVolume, first, second)) return gas.at(*T, *v);
+        if (const auto p = valueOf(Property::pressure, first, second)) {
+            const bool isNear = guess && !guess->vapourFraction;
+            const auto v = molarVolumeAt(equation, *T, *p, isNear ? guess->molarVolume : 0.0);
+            if (!v) return std::nullopt;
+            return homogeneousState(equation, *T, *v);
+        }
+    }
+    if (!guess || !guess->vapourFraction) {
+        const auto state = newton(gas, first, second, realStart(gas, first, second, guess));
+        if (state && state->dpdv < 0.0 && isOnEquilibriumSurface(equation, *state)) return state;
+    }
+    return equilibriumState(gas, first, second);
+}
+
+} // namespace
+
 Outcome<MolarState> insideModel(const Gas &gas, const MolarState &state)
 {
     const Range &hard = gas.validity().hard;
@@ -150,35 +112,15 @@ Outcome<MolarState> insideModel(const Gas &gas, const MolarState &state)
             "",
             {"the gas would be at {0}, but its model ends at {1}",
              {Figure{Quantity::pressure, state.pressure}, Figure{Quantity::pressure, hard.highestPressure}}}};
+    const Equation *equation = gas.equation();
+    if (equation && !equation->saturation && !isOnEquilibriumSurface(*equation, state)) return condenses(gas, state);
     return state;
 }
 
-struct Start {
-    double temperature;
-    double molarVolume;
-};
-
-Start firstGuess(const Gas &gas, Given first, Given second, const MolarState *guess)
+Outcome<MolarState> stateAt(const Gas &gas, double temperature, double molarVolume)
 {
-    const double temperature =
-        valueOf(Property::temperature, first, second).value_or(guess ? guess->temperature : referenceTemperature);
-    if (const auto v = valueOf(Property::molarVolume, first, second)) return {temperature, *v};
-    if (guess) return {temperature, guess->molarVolume};
-    const double pressure = valueOf(Property::pressure, first, second).value_or(referencePressure);
-    return {temperature, gas.gasConstant() * temperature / pressure};
+    return insideModel(gas, gas.at(temperature, molarVolume));
 }
-
-/// An ideal gas by p and v or p and T, from p v = R T without iteration.
-std::optional<MolarState> idealFromPressure(const Gas &gas, Given first, Given second)
-{
-    const auto p = valueOf(Property::pressure, first, second);
-    if (!p) return std::nullopt;
-    if (const auto v = valueOf(Property::molarVolume, first, second)) return gas.at(*p * *v / gas.gasConstant(), *v);
-    if (const auto T = valueOf(Property::temperature, first, second)) return gas.at(*T, gas.gasConstant() * *T / *p);
-    return std::nullopt;
-}
-
-} // namespace
 
 Outcome<MolarState> stateFrom(const Gas &gas, Given first, Given second, const MolarState *guess)
 {
@@ -191,28 +133,9 @@ Outcome<MolarState> stateFrom(const Gas &gas, Given first, Given second, const M
             Reason::undetermined,
             "",
             {"{0} and {1} do not fix the state of this gas", {wordsOf(first.property), wordsOf(second.property)}}};
-
-    if (gas.isIdeal())
-        if (const auto state = idealFromPressure(gas, first, second)) return insideModel(gas, *state);
-
-    auto [temperature, molarVolume] = firstGuess(gas, first, second, guess);
-    for (int i = 0; i < mostSteps; ++i) {
-        const MolarState state = gas.at(temperature, molarVolume);
-        const auto step =
-            newtonStep(residual(state, first, gas.gasConstant()), residual(state, second, gas.gasConstant()));
-        if (!step || !std::isfinite(step->lnT) || !std::isfinite(step->lnV)) return noState(first, second);
-        const Step taken = shortened(*step);
-        temperature *= std::exp(taken.lnT);
-        molarVolume *= std::exp(taken.lnV);
-        if (!(temperature > 0.0 && molarVolume > 0.0 && std::isfinite(temperature) && std::isfinite(molarVolume)))
-            return noState(first, second);
-        if (std::abs(taken.lnT) < lastStep && std::abs(taken.lnV) < lastStep)
-            return insideModel(gas, gas.at(temperature, molarVolume));
-        // Far outside the model there is nothing to converge to.
-        if (temperature < 1e-3 * gas.validity().hard.lowestTemperature || temperature < 1e-30)
-            return noState(first, second);
-    }
-    return noState(first, second);
+    const auto state = gas.isIdeal() ? idealState(gas, first, second, guess) : realState(gas, first, second, guess);
+    if (!state) return noState(first, second);
+    return insideModel(gas, *state);
 }
 
 } // namespace quasistat::gas

@@ -1,0 +1,88 @@
+#include "core/gas/equation/published.h"
+
+#include "core/gas/equation/non_analytic.h"
+
+#include <cmath>
+
+namespace quasistat::gas
+{
+namespace
+{
+
+/// A term's logarithmic derivatives: first = x ∂ln φ/∂x, slope = x ∂first/∂x.
+struct Logarithmic {
+    double first;
+    double slope;
+    [[nodiscard]] double second() const { return first * (first - 1.0) + slope; } ///< x² φ_xx/φ
+};
+
+Alpha termOf(double value, Logarithmic inTau, Logarithmic inDelta)
+{
+    return {.a00 = value,
+            .a10 = value * inTau.first,
+            .a01 = value * inDelta.first,
+            .a20 = value * inTau.second(),
+            .a11 = value * inTau.first * inDelta.first,
+            .a02 = value * inDelta.second()};
+}
+
+Alpha valueOf(const PowerTerm &k, double tau, double delta)
+{
+    const double power = k.n * std::pow(delta, k.d) * std::pow(tau, k.t);
+    if (k.l == 0) return termOf(power, {k.t, 0.0}, {static_cast<double>(k.d), 0.0});
+    const double u = k.g * std::pow(delta, k.l);
+    return termOf(power * std::exp(-u), {k.t, 0.0}, {k.d - k.l * u, -k.l * k.l * u});
+}
+
+/// Of exp(−c (x − x₀)²): −2c x(x − x₀) and its slope.
+Logarithmic bell(double c, double x0, double x)
+{
+    return {-2.0 * c * x * (x - x0), -2.0 * c * x * (2.0 * x - x0)};
+}
+
+Alpha valueOf(const GaussianTerm &k, double tau, double delta)
+{
+    const double value = k.n * std::pow(delta, k.d) * std::pow(tau, k.t) *
+                         std::exp(-k.eta * std::pow(delta - k.epsilon, 2) - k.beta * std::pow(tau - k.gamma, 2));
+    const Logarithmic inTau = bell(k.beta, k.gamma, tau);
+    const Logarithmic inDelta = bell(k.eta, k.epsilon, delta);
+    return termOf(value, {k.t + inTau.first, inTau.slope}, {k.d + inDelta.first, inDelta.slope});
+}
+
+Alpha valueOf(const DepartureTerm &k, double tau, double delta)
+{
+    const double value = k.n * std::pow(delta, k.d) * std::pow(tau, k.t) *
+                         std::exp(-k.eta * std::pow(delta - k.epsilon, 2) - k.beta * (delta - k.gamma));
+    const Logarithmic inDelta = bell(k.eta, k.epsilon, delta);
+    return termOf(value, {k.t, 0.0}, {k.d + inDelta.first - k.beta * delta, inDelta.slope - k.beta * delta});
+}
+
+Alpha valueOf(const AssociatingTerm &k, double tau, double delta)
+{
+    const double x = tau - k.gamma;
+    const double w = 1.0 / (k.beta * x * x + k.b);
+    const double value =
+        k.n * std::pow(delta, k.d) * std::pow(tau, k.t) * std::exp(k.eta * std::pow(delta - k.epsilon, 2) + w);
+    // w = 1/(βx² + b): dw/dτ = −2βx w², d²w/dτ² = (8β²x² w − 2β) w²
+    const double first = -2.0 * k.beta * x * w * w;
+    const double second = (8.0 * k.beta * k.beta * x * x * w - 2.0 * k.beta) * w * w;
+    const Logarithmic inDelta = bell(-k.eta, k.epsilon, delta);
+    return termOf(value, {k.t + tau * first, tau * first + tau * tau * second}, {k.d + inDelta.first, inDelta.slope});
+}
+
+} // namespace
+
+Alpha publishedResidual(const ResidualTerms &terms, double temperature, double density)
+{
+    const double tau = terms.reducingTemperature / temperature;
+    const double delta = density / terms.reducingDensity;
+    Alpha sum;
+    for (const PowerTerm &term : terms.powers) add(sum, valueOf(term, tau, delta));
+    for (const GaussianTerm &term : terms.gaussians) add(sum, valueOf(term, tau, delta));
+    for (const DepartureTerm &term : terms.departures) add(sum, valueOf(term, tau, delta));
+    for (const AssociatingTerm &term : terms.associating) add(sum, valueOf(term, tau, delta));
+    for (const NonAnalyticTerm &term : terms.nonAnalytic) add(sum, nonAnalytic(term, tau, delta));
+    return sum;
+}
+
+} // namespace quasistat::gas
