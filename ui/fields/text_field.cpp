@@ -137,6 +137,7 @@ void TextField::focusOutEvent(QFocusEvent *event)
 
 void TextField::enter()
 {
+    if (completer()) completer()->popup()->hide();
     if (!isModified()) return;
     setModified(false);
     emit entered(text());

@@ -124,7 +124,8 @@ void GasEditor::refresh()
 
 void GasEditor::refreshMixture()
 {
-    const document::Design &design = m_session.now().design;
+    // Not the design shown: what is previewed while a fraction is typed comes from the rows themselves.
+    const document::Design &design = m_session.base().design;
     const std::string model = modelOf(design);
     m_composition->setVisible(takesMixture(model));
     if (takesMixture(model)) {
@@ -167,6 +168,8 @@ void GasEditor::refreshNote()
         words = modelChangeWords(*before, now).unstyled();
     else if (now.failure && !isLacking && now.failure->pointer.rfind("/gas", 0) == 0)
         words = sentenceOf(*now.failure, now.units);
+    else if (now.evaluation && !isLacking && !now.evaluation->path.gas->isIdeal())
+        words = validityWords(now.evaluation->path.gas->validity(), now.units);
     const bool isWrong = isLacking || (now.failure && now.failure->pointer.rfind("/gas", 0) == 0);
     m_note->setProperty("role", isWrong ? QStringLiteral("error") : QStringLiteral("secondary"));
     m_note->setStyleSheet(m_note->styleSheet()); // the sheet of the window asks for the role anew

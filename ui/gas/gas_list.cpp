@@ -1,5 +1,7 @@
 #include "ui/gas/gas_list.h"
 
+#include "core/gas/library/gas_files.h"
+
 #include <QStringList>
 
 #include <algorithm>
@@ -20,9 +22,15 @@ bool isSame(const QString &a, const QString &b)
 std::vector<GasEntry> gasesOf(std::string_view model, const gas::Library &library)
 {
     std::vector<GasEntry> gases;
-    if (model == "perfect") return gases;
-    for (const gas::ComponentFacts &facts : library.idealComponents())
-        gases.push_back({QString::fromStdString(facts.name), QString::fromStdString(facts.formula), {}});
+    if (std::ranges::find(gas::modelsOfGases(), model) == gas::modelsOfGases().end()) return gases;
+    for (const gas::ComponentFacts &facts : library.components(model)) {
+        QStringList aliases;
+        if (const auto data = library.data(facts.name))
+            for (const std::string &alias : (*data)->aliases) aliases << QString::fromStdString(alias);
+        gases.push_back({QString::fromStdString(facts.name), QString::fromStdString(facts.formula),
+                         aliases.join(QLatin1Char('\n'))});
+    }
+    // A reference equation has air of its own; a mixture takes it as its parts.
     if (!gasNamed(gases, QStringLiteral("air"))) gases.push_back({QStringLiteral("air"), {}, {}});
     std::ranges::sort(gases, {}, &GasEntry::name);
     return gases;

@@ -2,10 +2,14 @@
 
 #include "ui/fields/form_field.h"
 #include "ui/session/design_reading.h"
+#include "ui/session/sentences.h"
 #include "ui/strip/segment_form.h"
 
 #include <QCoreApplication>
 #include <QRegularExpression>
+
+#include <algorithm>
+#include <cmath>
 
 namespace quasistat::ui
 {
@@ -49,6 +53,28 @@ QString keyText(std::string_view key)
 
 } // namespace
 
+namespace
+{
+
+/// A mixture of many is called by what it has most of.
+QString shortName(const Design &design)
+{
+    constexpr std::size_t mostNamed = 3;
+    for (const char *pointer : {"/gas/composition", "/gas/composition_by_mass"}) {
+        const Json *shares = valueAt(design.json, pointer);
+        if (!shares || !shares->is_object() || shares->size() <= mostNamed) continue;
+        const auto most = std::max_element(shares->begin(), shares->end(), [](const Json &a, const Json &b) {
+            return typed(&a).toDouble() < typed(&b).toDouble();
+        });
+        return say("%1 %2 and %3 more")
+            .arg(QString::fromStdString(most.key()), typed(&*most))
+            .arg(shares->size() - 1);
+    }
+    return gasName(design);
+}
+
+} // namespace
+
 QString modelName(std::string_view model)
 {
     for (const ModelWords &words : table)
@@ -75,12 +101,35 @@ QString gasName(const Design &design)
 RichText gasWords(const Design &design)
 {
     const QString model = modelName(typedAt(design.json, "/gas/model").toStdString());
-    const QString name = gasName(design);
+    const QString name = shortName(design);
     RichText words = RichText::plain(name.isEmpty() ? model : QStringLiteral("%1, %2").arg(name, model));
     if (valueAt(design.json, "/gas/composition_by_mass")) words += RichText::plain(say(", by mass"));
     const QString ratio = typedAt(design.json, "/gas/heat_capacity_ratio");
     if (!ratio.isEmpty()) words += RichText::marked(QStringLiteral(", <i>γ</i> ")) + RichText::plain(asPrinted(ratio));
     return words;
+}
+
+QString rangeWords(const gas::Range &range, const units::DisplayUnits &units)
+{
+    QString words = say("%1 to %2")
+                        .arg(shownFigure(range.lowestTemperature, units::Quantity::temperature, units),
+                             shownFigure(range.highestTemperature, units::Quantity::temperature, units));
+    if (std::isfinite(range.highestPressure))
+        words += say(", up to %1").arg(shownFigure(range.highestPressure, units::Quantity::pressure, units));
+    return words;
+}
+
+QString validityWords(const gas::Validity &validity, const units::DisplayUnits &units)
+{
+    QStringList sentences;
+    if (std::isfinite(validity.valid.highestTemperature))
+        sentences << say("Published range: %1.").arg(rangeWords(validity.valid, units));
+    QString uncertainty = QString::fromStdString(validity.uncertainty);
+    if (!uncertainty.isEmpty()) {
+        if (!uncertainty.endsWith(QLatin1Char('.'))) uncertainty += QLatin1Char('.');
+        sentences << say("Published uncertainty: %1").arg(uncertainty);
+    }
+    return sentences.join(QLatin1Char(' '));
 }
 
 QString compositionText(const Json &composition)

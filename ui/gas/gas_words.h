@@ -22,10 +22,15 @@ inline constexpr std::array<std::string_view, 6> gasModels{
 /// As a choice among the models: what it is good for.
 [[nodiscard]] QString modelChoiceWords(std::string_view model);
 
-/// "nitrogen, reference equation"; of a perfect gas with its γ.
+/// "nitrogen, reference equation"; of a perfect gas with its γ; "methane 0.91 and 6 more, GERG-2008".
 [[nodiscard]] RichText gasWords(const document::Design &design);
 /// The gas alone: "nitrogen 0.78, oxygen 0.22"; empty where the document names none.
 [[nodiscard]] QString gasName(const document::Design &design);
+
+/// "63.15 K to 1000 K, up to 2200 MPa".
+[[nodiscard]] QString rangeWords(const gas::Range &range, const units::DisplayUnits &units);
+/// Published range and uncertainty as sentences; empty where neither is known.
+[[nodiscard]] QString validityWords(const gas::Validity &validity, const units::DisplayUnits &units);
 
 /// "nitrogen 0.78, oxygen 0.22", as the composition of a document is written in one line; and back.
 [[nodiscard]] QString compositionText(const document::Json &composition);

@@ -33,16 +33,6 @@ QString text(std::string_view words)
     return QString::fromUtf8(words.data(), static_cast<qsizetype>(words.size()));
 }
 
-QString rangeWords(const gas::Range &range, const units::DisplayUnits &units)
-{
-    QString words = say("%1 to %2")
-                        .arg(shownFigure(range.lowestTemperature, Quantity::temperature, units),
-                             shownFigure(range.highestTemperature, Quantity::temperature, units));
-    if (std::isfinite(range.highestPressure))
-        words += say(", up to %1").arg(shownFigure(range.highestPressure, Quantity::pressure, units));
-    return words;
-}
-
 QString compositionWords(const gas::Composition &composition)
 {
     QStringList shares;
@@ -150,13 +140,8 @@ std::vector<Block> modelSection(const ReportContent &content)
     if (gas.composition().size() > 1) add(say("Mole fractions: %1.").arg(compositionWords(gas.composition())));
     const bool isCubic = gas.model() == "peng-robinson" || gas.model() == "soave-redlich-kwong";
     if (isCubic && gas.composition().size() > 1) add(interactionWords(design));
-    const gas::Validity &validity = gas.validity();
-    if (std::isfinite(validity.valid.highestTemperature))
-        add(say("Published range: %1.").arg(rangeWords(validity.valid, units)));
-    if (!validity.uncertainty.empty())
-        add(say("Published uncertainty: %1").arg(text(validity.uncertainty)) +
-            (validity.uncertainty.ends_with('.') ? QString() : QStringLiteral(".")));
-    else if (!gas.isIdeal())
+    if (const QString words = validityWords(gas.validity(), units); !words.isEmpty()) add(words);
+    if (gas.validity().uncertainty.empty() && !gas.isIdeal())
         add(say("No published uncertainty is known here for this gas."));
     const QString source = text(gas.source());
     add(say("Source: %1").arg(source) + (source.endsWith(QLatin1Char('.')) ? QString() : QStringLiteral(".")));
