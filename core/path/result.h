@@ -98,7 +98,7 @@ struct SegmentResult {
     double amountIn = 0.0;                  ///< [mol]
     std::optional<double> availableWorkOut; ///< [J]
     std::optional<IdealGasFigures> idealGas;
-    std::optional<double> duration; ///< [s]
+    std::optional<double> duration;            ///< [s]
     std::vector<PhaseCrossing> phaseCrossings; ///< in the order of the path
 
     Extrema extrema{};

@@ -1,6 +1,7 @@
 // Every data file of resources/gases is read: what it says is complete and makes sense.
 
 #include "core/gas/library/gas_files.h"
+#include "tests/bench/transcription.h"
 #include "tests/support/gases.h"
 
 #include <algorithm>
@@ -107,6 +108,38 @@ TEST(GasFiles, AncillaryPressureIsThatOfThePublishedTable)
     EXPECT_NEAR(valueOf(*nitrogen->saturationPressure, 100.0) / 778270.0, 1.0, 6e-5);
     // 24608 mol/m³ of liquid at 100 K in the same table; `dev_max` 2.6e-4.
     EXPECT_NEAR(valueOf(nitrogen->liquidDensity, 100.0) / 24608.0, 1.0, 3e-4);
+}
+
+TEST(GasFiles, IdealPartsHaveTheEnthalpyAndEntropyThatTheFileGivesFor298K)
+{
+    for (const std::string &name : gasNames()) {
+        const auto data = readGas(name).reference;
+        if (!data) continue;
+        SCOPED_TRACE(name);
+        const double density = 101325.0 / (data->gasConstant * 298.15);
+        const transcription::Derivatives a = transcription::idealSum(
+            data->ideal, data->ideal.reducingTemperature / 298.15, density / data->residual.reducingDensity);
+        // Ten digits are printed.
+        const double enthalpy = data->gasConstant * 298.15 * (1.0 + a.a10);
+        const double entropy = data->gasConstant * (a.a10 - a.a00);
+        EXPECT_NEAR(enthalpy, data->idealEnthalpy298, 1e-9 * std::abs(data->idealEnthalpy298) + 1e-5);
+        EXPECT_NEAR(entropy, data->idealEntropy298, 1e-9 * std::abs(data->idealEntropy298) + 1e-8);
+    }
+}
+
+TEST(GasFiles, ComponentsOfGergHaveTheirZerosOfEnthalpyAndEntropyAt298K)
+{
+    // "checked: below 5e-5 J/mol and 5e-8 J/(mol K)" (notes of mixtures/gerg_2008.json).
+    for (const ComponentFacts &facts : test::library().components("gerg-2008")) {
+        SCOPED_TRACE(facts.name);
+        const GergMixture pure = *test::library().gergMixture({{facts.name, 1.0}});
+        const IdealTerms terms = idealTerms(pure, {1.0});
+        const double r = pure.model->gasConstant();
+        const transcription::Derivatives a = transcription::idealSum(
+            terms, terms.reducingTemperature / 298.15, 101325.0 / (r * 298.15) / reducing(pure, {1.0}).density);
+        EXPECT_NEAR(r * 298.15 * (1.0 + a.a10), 0.0, 5e-5);
+        EXPECT_NEAR(r * (a.a10 - a.a00), 0.0, 5e-8);
+    }
 }
 
 TEST(GasFiles, UnusualTermsAreRead)

@@ -19,11 +19,10 @@ struct CubicSubstance {
 
 /// a = ΣΣ xᵢxⱼ(1 − kᵢⱼ) αᵢαⱼ and b = Σ xᵢbᵢ, with αᵢ(T) = sqrt(aᵢ(T)) = Aᵢ − Bᵢ sqrt(T).
 ///
-/// αᵢ keeps the sign of Soave's bracket 1 + m(1 − sqrt(T/T_c)), which passes zero far above T_c (hydrogen: about
-/// 400 K by the 1976 function; heavier gases above 2000 K). The usual |αᵢ| would put a kink into a(T) there: c_v would
-/// jump and Newton would stumble over it. With the sign kept everything is smooth, and for a pure substance nothing
-/// else changes, for only αᵢ² enters. In a mixture the cross term turns from attraction to repulsion, as small as it
-/// is.
+/// αᵢ keeps the sign of Soave's bracket 1 + m(1 − sqrt(T/T_c)), which passes zero far above T_c (nitrogen: at 1390 K by
+/// Peng and Robinson's function, at 1030 K by Soave's). The usual |αᵢ| would put a kink into a(T) of a mixture there:
+/// c_v would jump and Newton's method stumble. With the sign kept everything is smooth, and a pure gas stays as
+/// published, for only αᵢ² enters. Between the zeros of two components their cross term repels, as weak as it is there.
 class CubicMixture
 {
 public:

@@ -3,6 +3,7 @@
 #include "core/gas/constants.h"
 #include "core/gas/ideal/ideal_mixture.h"
 #include "core/gas/library/ideal_part.h"
+#include "core/gas/library/real_gases.h"
 #include "core/outcome/near_names.h"
 
 #include <algorithm>
@@ -201,6 +202,21 @@ Outcome<GergMixture> Library::gergMixture(const Composition &composition) const
     }
     if (names.empty()) return Failure{Reason::missing, "", {"a composition needs at least one gas", {}}};
     return quasistat::gas::gergMixture(m_store->gergModel(), names, std::move(components));
+}
+
+Outcome<GasPtr> Library::gerg2008(const Composition &composition, std::string name) const
+{
+    const Outcome<GergMixture> mixture = gergMixture(composition);
+    if (!mixture) return mixture.failure();
+    const GergModel &model = *mixture->model;
+    return gergGas(*mixture, composition, {model.gasConstant(), model.validity(), model.source()}, std::move(name));
+}
+
+Outcome<GasPtr> Library::reference(std::string_view fluid) const
+{
+    const Outcome<DataPtr> found = data(fluid, "reference");
+    if (!found) return found.failure();
+    return referenceGas(**found);
 }
 
 } // namespace quasistat::gas

@@ -19,6 +19,24 @@ namespace
 /// No published equation reaches this many times its critical density within its pressure range.
 constexpr double densestOverCritical = 6.0;
 
+/// The density at the highest pressure of the range and the lowest temperature, or where the equation's pressure stops
+/// rising: beyond it polynomials have branches that are no fluid.
+double highestDensity(const Equation &equation, const Range &hard, double liquidDensity)
+{
+    constexpr double step = 1.01;
+    Isotherm isotherm;
+    equation.residual->atTemperature(hard.lowestTemperature, false, isotherm);
+    const double RT = equation.gasConstant * hard.lowestTemperature;
+    double density = liquidDensity;
+    while (density < equation.highestDensity) {
+        const auto [a01, a02] = equation.residual->densityDerivatives(isotherm, density * step);
+        if (!(1.0 + 2.0 * a01 + a02 > 0.0)) break;
+        density *= step;
+        if (density * RT * (1.0 + a01) > hard.highestPressure) break;
+    }
+    return density;
+}
+
 void addPhases(Equation &equation, const ReferenceData &data)
 {
     const SaturationTable::CriticalPoint critical{data.criticalTemperature, data.criticalPressure,
@@ -36,6 +54,8 @@ void addPhases(Equation &equation, const ReferenceData &data)
     const auto equilibrium = pureEquilibrium(equation, {data.validity.hard.lowestTemperature, critical, guess});
     equation.saturation = equilibrium.saturation;
     equation.boundary = equilibrium.boundary;
+    if (const auto triple = equilibrium.saturation->atTemperature(data.validity.hard.lowestTemperature))
+        equation.highestDensity = highestDensity(equation, data.validity.hard, 1.0 / triple->liquid.molarVolume);
 }
 
 } // namespace
@@ -76,7 +96,7 @@ GasPtr gergGas(const GergMixture &mixture, const Composition &composition,
                       .ideal = helmholtzIdeal(idealTerms(mixture, fractions)),
                       .mixingEntropy = mixingEntropy(composition, model.gasConstant()),
                       .residual = std::make_shared<ResidualPlan>(residualTerms(mixture, fractions)),
-                      .highestDensity = densestOverCritical * reducing(mixture, fractions).density};
+                      .highestDensity = fugacities->closestPacking(fractions)};
     equation.boundary = std::make_shared<DewBoundary>(fugacities, fractions, model.validity().hard.lowestTemperature);
     return realGas(std::move(equation), {.model = "gerg-2008",
                                          .name = std::move(name),

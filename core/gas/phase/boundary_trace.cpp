@@ -51,6 +51,16 @@ double throughFour(const BoundaryTrace::Node *nodes, double lnDensity)
     return value;
 }
 
+BoundaryTrace::Node node(const IncipientPhase &phase, const IncipientState &state, const IncipientState &slopes)
+{
+    return {.lnDensity = state[phase.density()],
+            .lnTemperature = state[phase.temperature()],
+            .slope = slopes[phase.temperature()],
+            .distance = phase.distance(state),
+            .state = state,
+            .slopes = slopes};
+}
+
 /// One walk along the solutions.
 class Walk
 {
@@ -152,6 +162,7 @@ BoundaryTrace::BoundaryTrace(IncipientPhase &phase, const IncipientState &start,
     std::ranges::reverse(m_nodes);
     if (!m_nodes.empty()) m_nodes.pop_back(); // the start, which the other way begins with again
     follow(phase, start, 1.0, lnPacking + std::log(0.97), lnLowest);
+    refine(phase);
 }
 
 void BoundaryTrace::follow(IncipientPhase &phase, const IncipientState &start, double direction, double lnLimit,
@@ -162,16 +173,53 @@ void BoundaryTrace::follow(IncipientPhase &phase, const IncipientState &start, d
         const std::optional<IncipientState> slopes = walk.slopes();
         if (!slopes) return;
         const IncipientState &state = walk.state();
-        m_nodes.push_back({.lnDensity = state[phase.density()],
-                           .lnTemperature = state[phase.temperature()],
-                           .slope = (*slopes)[phase.temperature()],
-                           .distance = phase.distance(state),
-                           .state = state,
-                           .slopes = *slopes});
-        const Node &node = m_nodes.back();
-        if (node.lnTemperature < lnLowestTemperature && direction * node.slope < 0.0) return;
-        if (direction * (node.lnDensity - lnLimit) > 0.0) return;
+        m_nodes.push_back(node(phase, state, *slopes));
+        const Node &last = m_nodes.back();
+        if (last.lnTemperature < lnLowestTemperature && direction * last.slope < 0.0) return;
+        if (direction * (last.lnDensity - lnLimit) > 0.0) return;
         if (!walk.advance(*slopes)) return;
+    }
+}
+
+/// Of ln T: h⁴/384 of the fourth derivative, which the third derivatives of this cubic and its neighbours tell.
+double BoundaryTrace::interpolationError(std::size_t interval) const
+{
+    const auto third = [this](std::size_t k) {
+        const Node &a = m_nodes[k];
+        const Node &b = m_nodes[k + 1];
+        const double h = b.lnDensity - a.lnDensity;
+        return (12.0 * (a.lnTemperature - b.lnTemperature) / h + 6.0 * (a.slope + b.slope)) / (h * h);
+    };
+    const auto width = [this](std::size_t k) { return m_nodes[k + 1].lnDensity - m_nodes[k].lnDensity; };
+    const double h = width(interval);
+    double fourth = 0.0;
+    for (const std::size_t lower : {interval - 1, interval})
+        if (lower < m_nodes.size() && lower + 2 < m_nodes.size())
+            fourth =
+                std::max(fourth, std::abs(third(lower + 1) - third(lower)) / (0.5 * (width(lower) + width(lower + 1))));
+    return fourth * h * h * h * h / 384.0;
+}
+
+void BoundaryTrace::refine(IncipientPhase &phase)
+{
+    constexpr double tolerated = 3e-5;
+    constexpr int passes = 3;
+    for (int pass = 0; pass < passes; ++pass) {
+        std::vector<Node> added;
+        for (std::size_t k = 0; k + 1 < m_nodes.size(); ++k) {
+            if (interpolationError(k) < tolerated || leapsCriticalPoint(k)) continue;
+            const double middle = 0.5 * (m_nodes[k].lnDensity + m_nodes[k + 1].lnDensity);
+            IncipientState state = near(middle);
+            const double expected = state[phase.temperature()];
+            constexpr double wrong = 0.01; // another branch
+            if (!phase.solve(state, phase.density()) || std::abs(state[phase.temperature()] - expected) > wrong)
+                continue;
+            const std::optional<IncipientState> slopes = phase.tangent(state, phase.density());
+            if (slopes) added.push_back(node(phase, state, *slopes));
+        }
+        if (added.empty()) return;
+        m_nodes.insert(m_nodes.end(), added.begin(), added.end());
+        std::ranges::sort(m_nodes, {}, &Node::lnDensity);
     }
 }
 

@@ -40,6 +40,9 @@ public:
 private:
     void follow(IncipientPhase &phase, const IncipientState &start, double direction, double lnLimit,
                 double lnLowestTemperature);
+    /// Puts nodes between those whose cubic would be off by more than a third of what PhaseBoundary claims.
+    void refine(IncipientPhase &phase);
+    [[nodiscard]] double interpolationError(std::size_t interval) const;
     [[nodiscard]] bool leapsCriticalPoint(std::size_t interval) const;
     [[nodiscard]] std::size_t interval(double lnDensity) const; ///< index of its lower node
 

@@ -13,8 +13,7 @@ namespace quasistat::gas
 class GergFugacities final : public Fugacities
 {
 public:
-    /// `critical`: of each component, in its order; for first guesses alone. `gasConstant`: of GERG-2008. The departure
-    /// functions `mixture` points to must outlive this.
+    /// `critical`: of each component, in its order; for first guesses alone. `gasConstant`: of GERG-2008.
     GergFugacities(GergMixture mixture, std::vector<Critical> critical, double gasConstant);
 
     [[nodiscard]] std::size_t components() const override { return m_mixture.components.size(); }
