@@ -46,6 +46,7 @@ private:
     void fitOwnLines();
     void addOwnLine();
     void showOwn(std::size_t index);
+    [[nodiscard]] bool isKnown(const OwnGas &gas) const; ///< to the library
     void takeMixture(bool isTyping);
     void takeOwn(std::size_t index, const QString &id, const QString &text);
     void removeOwn(std::size_t index);

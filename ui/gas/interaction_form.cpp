@@ -5,6 +5,8 @@
 
 #include <QStringList>
 
+#include <algorithm>
+
 namespace quasistat::ui
 {
 
@@ -22,13 +24,21 @@ std::string reversed(const std::string &pair)
     return slash == std::string::npos ? pair : pair.substr(slash + 1) + "/" + pair.substr(0, slash);
 }
 
+void addName(std::vector<std::string> &names, const std::string &name)
+{
+    if (name == "air")
+        for (const char *part : {"nitrogen", "oxygen", "argon"}) addName(names, part);
+    else if (std::ranges::find(names, name) == names.end())
+        names.push_back(name);
+}
+
 /// Pairs "a/b" in the order of the composition; as the document writes them where it does.
 std::vector<std::string> pairsOf(const Design &design)
 {
     std::vector<std::string> names;
     for (const char *pointer : {"/gas/composition", "/gas/composition_by_mass"})
         if (const Json *shares = valueAt(design.json, pointer); shares && shares->is_object())
-            for (const auto &item : shares->items()) names.push_back(item.key());
+            for (const auto &item : shares->items()) addName(names, item.key());
     const Json *stated = valueAt(design.json, interactions);
     const bool isStated = stated && stated->is_object();
     std::vector<std::string> pairs;

@@ -7,7 +7,7 @@
 namespace quasistat::ui
 {
 
-/// Blank where the document says nothing: 0 holds. A pair that no longer belongs to the composition keeps its field.
+/// Blank where the document says nothing: 0 holds. Air is its parts.
 [[nodiscard]] std::vector<FormField> interactionForm(const document::Design &design);
 /// Blank takes the pair out.
 [[nodiscard]] document::Design interactionEntered(const document::Design &design, const FormField &field,

@@ -70,6 +70,29 @@ QString rowWords(const MixtureDraft &draft, std::size_t index, const std::vector
     return {};
 }
 
+/// What was stated of a pair goes with the gas that has gone.
+void dropPairsWithout(Json &gas, const Json &before, const Json &shares)
+{
+    const auto stated = gas.find("binary_interaction");
+    if (stated == gas.end() || !stated->is_object()) return;
+    const auto has = [](const Json &mixture, const std::string &name) {
+        const bool isOfAir = name == "nitrogen" || name == "oxygen" || name == "argon";
+        return mixture.contains(name) || (isOfAir && mixture.contains("air"));
+    };
+    const auto isGone = [&](const std::string &name) { return has(before, name) && !has(shares, name); };
+    Json kept = Json::object();
+    for (const auto &pair : stated->items()) {
+        const auto slash = pair.key().find('/');
+        if (slash == std::string::npos ||
+            (!isGone(pair.key().substr(0, slash)) && !isGone(pair.key().substr(slash + 1))))
+            kept[pair.key()] = pair.value();
+    }
+    if (kept.empty())
+        gas.erase("binary_interaction");
+    else
+        *stated = kept;
+}
+
 QString sumWords(double sum)
 {
     const double off = sum - 1.0;
@@ -129,6 +152,7 @@ Design withMixture(const Design &design, const MixtureDraft &draft)
         if (!row.name.trimmed().isEmpty()) shares[row.name.trimmed().toStdString()] = numberAsTyped(row.share.trimmed());
     // In the place where it stood: the order of the file is kept.
     Json gas = Json::object();
+    Json before = Json::object();
     const std::string key = draft.byMass ? "composition_by_mass" : "composition";
     bool isPlaced = false;
     for (const auto &item : design.json.at("gas").items()) {
@@ -137,9 +161,11 @@ Design withMixture(const Design &design, const MixtureDraft &draft)
             gas[item.key()] = item.value();
         else if (!isPlaced)
             gas[key] = shares;
+        if (isMixture && item.value().is_object()) before = item.value();
         isPlaced = isPlaced || isMixture;
     }
     if (!isPlaced) gas[key] = shares;
+    dropPairsWithout(gas, before, shares);
     return withValue(design, "/gas", gas);
 }
 

@@ -129,13 +129,15 @@ OwnGas ownGasEntered(const OwnGas &gas, const FormField &field, const QString &t
     return changed;
 }
 
-QString stillMissing(const OwnGas &gas)
+QString stillMissing(const OwnGas &gas, bool isKnown)
 {
     QStringList missing;
     if (gas.name.isEmpty()) missing << say("a name");
+    if (isKnown && gas.facts.empty()) missing << say("a value of your own");
     const bool hasHeat = has(gas, "/heat_capacity");
     for (const OwnField &entry : fields) {
-        const bool isNeeded = entry.isNeeded || hasHeat;
+        const bool isOfHeat = !entry.isNeeded;
+        const bool isNeeded = isOfHeat ? hasHeat : !isKnown;
         if (isNeeded && !has(gas, entry.id)) missing << say(entry.caption);
     }
     return missing.join(QStringLiteral(", "));

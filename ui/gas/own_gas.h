@@ -20,8 +20,9 @@ struct OwnGas {
 [[nodiscard]] std::vector<FormField> ownGasForm(const OwnGas &gas);
 /// The entry after `text` was entered in `field`.
 [[nodiscard]] OwnGas ownGasEntered(const OwnGas &gas, const FormField &field, const QString &text);
-/// What it still needs before it can stand in the document: "critical pressure, molar mass"; empty if nothing.
-[[nodiscard]] QString stillMissing(const OwnGas &gas);
+/// What it still needs before it can stand in the document: "critical pressure, molar mass"; empty if nothing. A gas
+/// that the library knows needs only what shall differ.
+[[nodiscard]] QString stillMissing(const OwnGas &gas, bool isKnown);
 
 /// The design with these gases of the user’s own; each needs its name.
 [[nodiscard]] document::Design withOwnGases(const document::Design &design, const std::vector<OwnGas> &gases);

@@ -60,10 +60,15 @@ void GasEditor::addOwnLine()
     m_ownLines.push_back(line);
 }
 
+bool GasEditor::isKnown(const OwnGas &gas) const
+{
+    return m_session.library().componentName(gas.name.toStdString(), "peng-robinson").ok();
+}
+
 void GasEditor::showOwn(std::size_t index)
 {
     m_ownLines[index].form->setForm(ownGasForm(m_own[index]));
-    const QString missing = stillMissing(m_own[index]);
+    const QString missing = stillMissing(m_own[index], isKnown(m_own[index]));
     m_ownLines[index].words->setText(tr("Still needed: %1.").arg(missing));
     m_ownLines[index].words->setVisible(!missing.isEmpty());
 }
@@ -91,7 +96,7 @@ void GasEditor::applyOwn(const QString &renamedFrom, const QString &renamedTo)
     std::vector<OwnGas> ready;
     for (const OwnGas &gas : m_own) {
         const auto before = std::ranges::find(stated, gas.name, &OwnGas::name);
-        if (stillMissing(gas).isEmpty())
+        if (stillMissing(gas, isKnown(gas)).isEmpty())
             ready.push_back(gas);
         else if (before != stated.end())
             ready.push_back(*before);
