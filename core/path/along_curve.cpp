@@ -20,7 +20,10 @@ constexpr double quadratureTolerance = 1e-12;
 /// Below this share of RT per coordinate an integrand is the rounding of zero (heat at n = γ): halving it again finds
 /// nothing.
 constexpr double roundingOfZero = 1e-14;
-constexpr int mostHalvings = 14;
+/// An error below this share of the largest stretch met is below the rounding of the whole. It is what ends the halving
+/// about a jump whose place is known to all digits but the last.
+constexpr double negligible = 1e-13;
+constexpr int mostHalvings = 40;
 
 double rootBetween(const QuasiStaticCurve &curve, const Figures &figure, double a, double b, double fa, double fb)
 {
@@ -113,8 +116,9 @@ private:
             half * boost::math::quadrature::gauss_kronrod<double, 21>::integrate(
                        [&](double t) { return value(middle + half * t); }, -1.0, 1.0, 0, 0.0, &error, &magnitude);
         error *= std::abs(half);
-        const double tolerance =
-            std::max(quadratureTolerance * std::abs(half * magnitude), m_floor * std::abs(to - from));
+        m_largest = std::max(m_largest, std::abs(half * magnitude));
+        const double tolerance = std::max(
+            {quadratureTolerance * std::abs(half * magnitude), m_floor * std::abs(to - from), negligible * m_largest});
         if (error <= tolerance || m_left) {
             m_sum += part;
             return;
@@ -131,6 +135,7 @@ private:
     const Figures &m_integrand;
     gas::MolarState m_neighbour;
     double m_floor;
+    double m_largest = 0.0;
     double m_sum = 0.0;
     bool m_converged = true;
     std::optional<Failure> m_left; ///< the curve left the model

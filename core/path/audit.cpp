@@ -14,6 +14,7 @@ namespace
 struct Changes {
     double internalEnergy; ///< [J]
     double entropy;        ///< [J/K]
+    double magnitude;      ///< of the parts that may cancel in the internal energy [J]
 };
 
 /// ∫ of what T and v change along one stretch, each integral split where the integrand bends or jumps.
@@ -33,7 +34,7 @@ Outcome<Changes> changesAlong(const QuasiStaticCurve &curve)
     });
     if (!energy) return energy.failure();
     if (!entropy) return entropy.failure();
-    return Changes{curve.amount() * *energy, curve.amount() * *entropy};
+    return Changes{curve.amount() * *energy, curve.amount() * *entropy, curve.amount() * std::abs(*energy)};
 }
 
 /// Along `first` from the start, then along the other of isotherm and isochore to the end.
@@ -51,7 +52,7 @@ Outcome<Changes> changesByWayOf(const Law &first, const gas::State &from, const 
     if (!a) return a;
     const auto b = changesAlong(two);
     if (!b) return b;
-    return Changes{a->internalEnergy + b->internalEnergy, a->entropy + b->entropy};
+    return Changes{a->internalEnergy + b->internalEnergy, a->entropy + b->entropy, a->magnitude + b->magnitude};
 }
 
 /// du = c_v dT + (T (∂p/∂T)_v − p) dv and ds = c_v/T dT + (∂p/∂T)_v dv, integrated from one state to the other. A
@@ -87,6 +88,9 @@ Audit irreversibleAudit(const gas::State &from, const gas::State &to, const Irre
     Audit audit{.scale = auditScale(from, account.work, account.heat, deltaU)};
     const auto changes = changesByQuadrature(from, to);
     if (!changes) return audit; // not ok: what cannot be checked is not shown as good
+    // A gas that expands freely keeps its energy as the small difference of two that the integrals do not know to
+    // cancel.
+    audit.scale = std::max(audit.scale, changes->magnitude);
     const double T0 = account.surroundingsTemperature;
     const double availableHeat = account.bathTemperature ? account.heat * (1.0 - T0 / *account.bathTemperature) : 0.0;
     audit.firstLawResidual = changes->internalEnergy - account.work - account.heat;

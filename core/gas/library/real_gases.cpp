@@ -8,6 +8,7 @@
 #include "core/gas/phase/dew_boundary.h"
 #include "core/gas/phase/gerg_fugacities.h"
 #include "core/gas/phase/pure_saturation.h"
+#include "core/gas/solve/density.h"
 
 #include <cassert>
 

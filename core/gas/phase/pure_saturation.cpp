@@ -13,7 +13,7 @@ namespace
 
 constexpr int nodeCount = 160;
 /// Closer to the critical temperature than this share of it, the two phases differ by less than Newton can tell apart.
-constexpr double nearestToCritical = 1e-6;
+constexpr double lastMillionth = 1e-6;
 constexpr int mostSteps = 60;
 /// Newton squares its error: after a step of this relative size the next is below rounding.
 constexpr double lastStep = 1e-9;
@@ -85,7 +85,7 @@ SaturationTable tableOf(const Equation &equation, const PureFluid &fluid)
 {
     const double Tc = fluid.critical.temperature;
     const double coldest = std::cbrt(1.0 - fluid.tripleTemperature / Tc);
-    const double hottest = std::cbrt(nearestToCritical);
+    const double hottest = std::cbrt(lastMillionth);
     std::vector<SaturationTable::Node> nodes; // from the cold end
     for (int i = 0; i < nodeCount; ++i) {
         const double w = coldest + (hottest - coldest) * i / (nodeCount - 1);
@@ -247,7 +247,10 @@ PureEquilibrium pureEquilibrium(const Equation &equation, const PureFluid &fluid
 
 std::shared_ptr<const PhaseBoundary> pseudoPureBoundary(const Equation &equation, const PseudoPureFluid &fluid)
 {
+    // Closer to the critical point the published liquid density is the small difference of large powers.
+    constexpr double nearestToCritical = 0.9999;
     const auto exact = [equation, fluid](double T) -> std::optional<SaturatedDensities> {
+        if (T > nearestToCritical * fluid.critical.temperature) return std::nullopt;
         const auto vapour = vapourDensity(equation, T, fluid.dewPressure(T));
         if (!vapour) return std::nullopt;
         return SaturatedDensities{fluid.liquidDensity(T), *vapour};

@@ -10,7 +10,7 @@ namespace quasistat::gas
 namespace
 {
 
-/// The cubic through the four points about `x`; `xs` runs one way.
+/// The cubic through the four points about `x`, kept between its two neighbours' values; `xs` runs one way.
 double cubicThrough(std::span<const double> xs, std::span<const double> ys, double x)
 {
     const bool ascending = xs.back() > xs.front();
@@ -26,7 +26,8 @@ double cubicThrough(std::span<const double> xs, std::span<const double> ys, doub
             if (j != i) weight *= (x - xs[j]) / (xs[i] - xs[j]);
         sum += weight;
     }
-    return sum;
+    const auto right = static_cast<std::size_t>(std::clamp<std::ptrdiff_t>(index, 1, last + 3));
+    return std::clamp(sum, std::min(ys[right - 1], ys[right]), std::max(ys[right - 1], ys[right]));
 }
 
 } // namespace

@@ -3,7 +3,9 @@
 #include "core/gas/phase/saturation.h"
 #include "core/gas/solve/bracketed_root.h"
 
+#include <algorithm>
 #include <cmath>
+#include <vector>
 
 namespace quasistat::gas
 {
@@ -54,41 +56,26 @@ private:
     Isotherm m_isotherm;
 };
 
-/// The roots of an isotherm that may have several: the thinnest and the densest on rising branches.
-struct Roots {
-    std::optional<double> vapour;
-    std::optional<double> liquid;
-};
-
-Roots rootsOf(const Equation &equation, const PressureIsotherm &isotherm)
+/// The densities at which an isotherm passes the target rising, from thin to dense: vapour, liquid, and where
+/// polynomials go astray beyond any fluid, more.
+std::vector<double> rootsOf(const Equation &equation, const PressureIsotherm &isotherm)
 {
-    // From both ends, in steps fine enough to meet each branch: where the pressure passes the target rising.
+    // In steps fine enough to meet each branch.
     constexpr int stepsPerDecade = 40;
     const double factor = std::pow(10.0, 1.0 / stepsPerDecade);
-    Roots roots;
+    std::vector<double> roots;
     double low = 0.5 * std::min(isotherm.target(), equation.highestDensity);
     double atLow = isotherm(low).value;
     while (atLow > 0.0 && low > 1e-12 * isotherm.target()) atLow = isotherm(low *= 0.5).value;
     while (low < equation.highestDensity) {
         const double high = std::min(low * factor, equation.highestDensity);
         const double atHigh = isotherm(high).value;
-        if (atLow <= 0.0 && atHigh > 0.0) {
-            const auto root = risingRoot(isotherm, low, high, low);
-            if (root && !roots.vapour) roots.vapour = root;
-            roots.liquid = root;
-        }
+        if (atLow <= 0.0 && atHigh > 0.0)
+            if (const auto root = risingRoot(isotherm, low, high, low)) roots.push_back(*root);
         low = high;
         atLow = atHigh;
-        if (high >= equation.highestDensity) break;
     }
     return roots;
-}
-
-/// g/(R T) up to a function of the temperature.
-double reducedGibbs(const Equation &equation, double temperature, double density)
-{
-    const Alpha a = equation.residual->at(temperature, density);
-    return std::log(density) + a.a00 + a.a01;
 }
 
 bool isStable(const Equation &equation, double temperature, double density)
@@ -135,11 +122,14 @@ std::optional<double> molarVolumeAt(const Equation &equation, double temperature
         if (equation.saturation && temperature < equation.saturation->criticalTemperature()) {
             density = saturatedSide(equation, temperature, pressure);
         } else {
-            const Roots roots = rootsOf(equation, isotherm);
-            density = roots.vapour;
-            if (roots.vapour && roots.liquid && *roots.liquid != *roots.vapour &&
-                reducedGibbs(equation, temperature, *roots.liquid) < reducedGibbs(equation, temperature, *roots.vapour))
-                density = roots.liquid;
+            const std::vector<double> roots = rootsOf(equation, isotherm);
+            const auto stable =
+                std::ranges::find_if(roots, [&](double root) { return isStable(equation, temperature, root); });
+            density.reset();
+            if (stable != roots.end())
+                density = *stable;
+            else if (!roots.empty()) // in two phases: whoever asked will say so
+                density = roots.front();
         }
     }
     if (!density) return std::nullopt;

@@ -6,6 +6,7 @@
 
 #include <algorithm>
 #include <cmath>
+#include <limits>
 
 namespace quasistat::gas
 {
@@ -77,8 +78,8 @@ public:
             const MolarState s = m_gas.at(T, molarVolume);
             return {valueOf(other.property, s) - other.value, slopeAtVolume(other.property, s)};
         };
-        const double start = m_equation.boundary ? m_equation.boundary->temperatureNear(molarVolume) : 0.0;
-        const auto T = risingRoot(excess, m_coldest, m_hottest, start);
+        const double boundary = m_equation.boundary ? m_equation.boundary->temperatureNear(molarVolume) : 0.0;
+        const auto T = boundary > 0.0 ? risingRoot(excess, m_coldest, m_hottest, boundary) : hottestRoot(excess);
         if (!T) return std::nullopt;
         return m_gas.at(*T, molarVolume);
     }
@@ -106,7 +107,7 @@ public:
         };
         const auto excess = [&](double T) -> ValueAndSlope {
             const auto s = stateAt(T);
-            if (!s) return {std::nan(""), 0.0};
+            if (!s) return {-std::numeric_limits<double>::max(), 0.0}; // denser than any fluid: too cold
             return {valueOf(other.property, *s) - other.value, slopeAtPressure(other.property, *s)};
         };
         const auto T = risingRoot(excess, coldest, hottest, 0.0);
@@ -116,22 +117,23 @@ public:
 
     std::optional<MolarState> onIsotherm(double temperature, Given other) const
     {
-        // Far beyond any use, yet inside what a double can hold.
-        constexpr double thinnest = 1e12;
-        double smallest = 1.0 / m_equation.highestDensity;
-        double largest = thinnest;
+        Branches branches = branchesAt(temperature);
         if (m_equation.saturation) {
             if (const auto pair = m_equation.saturation->atTemperature(temperature)) {
                 const Side side = sideOf(*pair, other);
                 if (side.is == Side::Is::between) return side.mixture;
-                (side.is == Side::Is::vapour ? smallest : largest) = side.mixture.molarVolume;
+                branches.densestVapour = pair->vapour.molarVolume;
+                branches.thinnestLiquid = pair->liquid.molarVolume;
             }
         }
         const auto excess = [&](double lnV) -> ValueAndSlope {
             const MolarState s = homogeneousState(m_equation, temperature, std::exp(lnV));
             return {valueOf(other.property, s) - other.value, slopeAtTemperature(other.property, s)};
         };
-        const auto lnV = risingRoot(excess, std::log(smallest), std::log(largest), std::log(smallest) + 1.0);
+        const bool isLiquid = branches.thinnestLiquid && excess(std::log(*branches.thinnestLiquid)).value > 0.0;
+        const double low = std::log(isLiquid || !branches.densestVapour ? branches.smallest : *branches.densestVapour);
+        const double high = std::log(isLiquid ? *branches.thinnestLiquid : branches.largest);
+        const auto lnV = risingRoot(excess, low, high, isLiquid ? high - 0.01 : low + 1.0);
         if (!lnV) return std::nullopt;
         return homogeneousState(m_equation, temperature, std::exp(*lnV));
     }
@@ -157,24 +159,90 @@ public:
     }
 
 private:
+    /// On an isochore that meets no boundary: denser than any saturated liquid, where the equation goes on into what
+    /// would be the solid and may pass the same value again. The fluid's state is the one met first on the way down.
+    template <class Function>
+    [[nodiscard]] std::optional<double> hottestRoot(const Function &excess) const
+    {
+        constexpr double step = 0.85;
+        for (double high = m_hottest; high > m_coldest; high *= step) {
+            const double low = std::max(high * step, m_coldest);
+            if (excess(low).value <= 0.0) return risingRoot(excess, low, high, high);
+        }
+        return std::nullopt;
+    }
+
+    /// Molar volumes between which an isotherm is homogeneous: smallest … thinnestLiquid and densestVapour … largest,
+    /// or all the way.
+    struct Branches {
+        double smallest;
+        double largest;
+        std::optional<double> thinnestLiquid;
+        std::optional<double> densestVapour;
+    };
+
+    Branches branchesAt(double temperature) const
+    {
+        // Far beyond any use, yet inside what a double can hold.
+        constexpr double thinnest = 1e12;
+        Branches branches{1.0 / m_equation.highestDensity, thinnest, std::nullopt, std::nullopt};
+        const PhaseBoundary *boundary = m_equation.boundary.get();
+        if (!boundary || m_equation.saturation || temperature >= boundary->highestTemperature()) return branches;
+        // Without saturation states the ends are as near as the boundary is interpolated, on the homogeneous side.
+        constexpr double step = 0.02;
+        constexpr double longest = 25.0;
+        const double start = std::log(branches.smallest);
+        bool wasUnder = false;
+        for (double lnV = start; lnV < start + longest; lnV += step) {
+            const bool isUnder = boundary->temperatureNear(std::exp(lnV)) > temperature;
+            if (isUnder && !wasUnder && !branches.thinnestLiquid)
+                branches.thinnestLiquid = edge(temperature, lnV, lnV - step);
+            if (wasUnder && !isUnder) branches.densestVapour = edge(temperature, lnV - step, lnV);
+            wasUnder = isUnder;
+        }
+        return branches;
+    }
+
+    /// v at the edge of the two-phase region, between ln v under and outside the boundary.
+    double edge(double temperature, double under, double outside) const
+    {
+        for (int i = 0; i < 40; ++i) {
+            const double middle = 0.5 * (under + outside);
+            (m_equation.boundary->temperatureNear(std::exp(middle)) > temperature ? under : outside) = middle;
+        }
+        return std::exp(outside);
+    }
+
     /// Two values of ln v, ascending, between which `other` passes its value: from the coldest state of the isentrope
-    /// towards the dense side, in steps that grow.
+    /// towards the dense side or from the hottest towards the thin.
     std::optional<std::pair<double, double>> bracketOnIsentrope(double entropy, Given other) const
     {
-        const auto coldest = onIsotherm(m_coldest * (1.0 + 1e-12), {Property::entropy, entropy});
-        if (!coldest || valueOf(other.property, *coldest) > other.value) return std::nullopt;
+        if (const auto bracket = bracketFrom(m_coldest * (1.0 + 1e-12), -1.0, entropy, other)) return bracket;
+        return bracketFrom(0.5 * m_hottest, 1.0, entropy, other);
+    }
+
+    /// In steps of ln v that grow, as far as the model goes.
+    std::optional<std::pair<double, double>> bracketFrom(double temperature, double sign, double entropy,
+                                                         Given other) const
+    {
+        const auto start = onIsotherm(temperature, {Property::entropy, entropy});
+        if (!start) return std::nullopt;
+        const bool startsAbove = valueOf(other.property, *start) > other.value;
+        if (startsAbove != (sign > 0.0)) return std::nullopt; // u and h fall as the volume grows
         const double densest = -std::log(m_equation.highestDensity);
-        double large = std::log(coldest->molarVolume);
+        double here = std::log(start->molarVolume);
         double step = 1e-3;
-        while (large > densest && step > 1e-6) {
-            const double small = std::max(large - step, densest);
-            const auto state = onIsochore(std::exp(small), {Property::entropy, entropy});
-            if (!state) { // hotter there than the model goes
+        while (here >= densest && here < densest + 60.0 && step > 1e-6) {
+            const double next = std::max(here + sign * step, densest);
+            const auto state = onIsochore(std::exp(next), {Property::entropy, entropy});
+            if (!state) { // beyond what the model has
                 step *= 0.25;
                 continue;
             }
-            if (valueOf(other.property, *state) >= other.value) return std::pair(small, large);
-            large = small;
+            if ((valueOf(other.property, *state) > other.value) != startsAbove)
+                return std::pair(std::min(here, next), std::max(here, next));
+            if (next == densest) return std::nullopt;
+            here = next;
             step *= 1.5;
         }
         return std::nullopt;
@@ -188,9 +256,11 @@ private:
 
 } // namespace
 
-std::optional<MolarState> equilibriumState(const Gas &gas, Given first, Given second)
+namespace
 {
-    const Equilibrium equilibrium(gas);
+
+std::optional<MolarState> found(const Equilibrium &equilibrium, Given first, Given second)
+{
     const auto has = [&](Property property) { return first.property == property || second.property == property; };
     const auto other = [&](Property property) { return first.property == property ? second : first; };
     const auto value = [&](Property property) { return first.property == property ? first.value : second.value; };
@@ -201,6 +271,31 @@ std::optional<MolarState> equilibriumState(const Gas &gas, Given first, Given se
         return equilibrium.onIsotherm(value(Property::temperature), other(Property::temperature));
     if (has(Property::entropy)) return equilibrium.onIsentrope(value(Property::entropy), other(Property::entropy));
     return std::nullopt;
+}
+
+/// A search that ends where the other property jumps, from liquid to vapour of a gas whose two-phase states are not
+/// computed, has found no state.
+bool isThere(const MolarState &state, Given given, double gasConstant)
+{
+    constexpr double farFromRounding = 1e-6;
+    const double RT = gasConstant * state.temperature;
+    const double scale =
+        given.property == Property::entropy ? gasConstant
+        : given.property == Property::pressure || given.property == Property::molarVolume ||
+                given.property == Property::temperature
+            ? std::abs(given.value) + (given.property == Property::pressure ? RT / state.molarVolume : 0.0)
+            : RT + std::abs(given.value);
+    return std::abs(valueOf(given.property, state) - given.value) <= farFromRounding * scale;
+}
+
+} // namespace
+
+std::optional<MolarState> equilibriumState(const Gas &gas, Given first, Given second)
+{
+    const auto state = found(Equilibrium(gas), first, second);
+    if (!state || !isThere(*state, first, gas.gasConstant()) || !isThere(*state, second, gas.gasConstant()))
+        return std::nullopt;
+    return state;
 }
 
 } // namespace quasistat::gas

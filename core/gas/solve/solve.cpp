@@ -66,6 +66,14 @@ bool isOnEquilibriumSurface(const Equation &equation, const MolarState &state)
     return !equation.boundary || !isTwoPhase(*equation.boundary, state.temperature, state.molarVolume);
 }
 
+/// Denser than saturated liquids an equation may have a second surface, in what would be the solid, that Newton finds
+/// from far away.
+bool isDenserThanAnyLiquid(const Equation &equation, const MolarState &state)
+{
+    return equation.saturation && state.molarVolume < 0.5 * equation.saturation->criticalVolume() &&
+           equation.boundary->temperatureNear(state.molarVolume) == 0.0;
+}
+
 /// The place where the search for a real gas begins: the neighbour, or where the ideal gas would be.
 Place realStart(const Gas &gas, Given first, Given second, const MolarState *guess)
 {
@@ -94,11 +102,53 @@ std::optional<MolarState> realState(const Gas &gas, Given first, Given second, c
                             (T && equation.saturation && *T < equation.saturation->criticalTemperature());
     std::optional<MolarState> quick;
     if (!mayMislead) quick = newton(gas, first, second, realStart(gas, first, second, guess));
-    if (quick && quick->dpdv < 0.0 && insideModel(gas, *quick) && isOnEquilibriumSurface(equation, *quick))
-        return quick;
-    if (const auto state = equilibriumState(gas, first, second)) return state;
-    if (quick && !insideModel(gas, *quick)) return quick; // whoever asked will say what bounds the model
+    const bool isRight =
+        quick && quick->dpdv < 0.0 && insideModel(gas, *quick) && isOnEquilibriumSurface(equation, *quick);
+    if (isRight && (guess || !isDenserThanAnyLiquid(equation, *quick))) return quick;
+    return equilibriumState(gas, first, second);
+}
+
+} // namespace
+
+namespace
+{
+
+/// The state at one end of the temperature range with one of the two given properties (v or p); none if neither is v or
+/// p, or the end has no such state.
+std::optional<MolarState> stateAtEnd(const Gas &gas, double temperature, Given first, Given second)
+{
+    if (const auto v = valueOf(Property::molarVolume, first, second)) return gas.at(temperature, *v);
+    if (const auto p = valueOf(Property::pressure, first, second)) {
+        const auto v = molarVolumeAt(*gas.equation(), temperature, *p);
+        if (v) return homogeneousState(*gas.equation(), temperature, *v);
+    }
     return std::nullopt;
+}
+
+/// Why a real gas has no such state: it would be colder or hotter than its model goes, or simply has none.
+Failure whyNoState(const Gas &gas, Given first, Given second)
+{
+    const Range &hard = gas.validity().hard;
+    const bool firstIsFixed = first.property == Property::molarVolume || first.property == Property::pressure;
+    const Given other = firstIsFixed ? second : first; // u, h, s and p at constant v all grow with temperature
+    const auto coldest = stateAtEnd(gas, hard.lowestTemperature, first, second);
+    if (coldest && other.value < valueOf(other.property, *coldest))
+        return {Reason::outsideModel,
+                "",
+                {"the gas would be colder than {0}, where its model ends",
+                 {Figure{Quantity::temperature, hard.lowestTemperature}}}};
+    const auto hottest = stateAtEnd(gas, hard.highestTemperature, first, second);
+    if (hottest && other.value > valueOf(other.property, *hottest))
+        return {Reason::outsideModel,
+                "",
+                {"the gas would be hotter than {0}, where its model ends",
+                 {Figure{Quantity::temperature, hard.highestTemperature}}}};
+    const Equation &equation = *gas.equation();
+    if (!equation.saturation)
+        if (const auto state = newton(gas, first, second, realStart(gas, first, second, nullptr));
+            state && !isOnEquilibriumSurface(equation, *state))
+            return condenses(gas, *state);
+    return noState(first, second);
 }
 
 } // namespace
@@ -144,7 +194,7 @@ Outcome<MolarState> stateFrom(const Gas &gas, Given first, Given second, const M
             "",
             {"{0} and {1} do not fix the state of this gas", {wordsOf(first.property), wordsOf(second.property)}}};
     const auto state = gas.isIdeal() ? idealState(gas, first, second, guess) : realState(gas, first, second, guess);
-    if (!state) return noState(first, second);
+    if (!state) return gas.isIdeal() ? noState(first, second) : whyNoState(gas, first, second);
     return insideModel(gas, *state);
 }
 
