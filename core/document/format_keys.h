@@ -35,6 +35,11 @@ inline constexpr std::array<std::string_view, 6> models{"perfect",   "ideal",   
                                                         "gerg-2008", "reference"};
 inline constexpr std::array<std::string_view, 4> perfectGas{"model", "name", "heat_capacity_ratio", "molar_mass"};
 inline constexpr std::array<std::string_view, 3> mixture{"model", "composition", "composition_by_mass"};
+/// What a cubic equation's gas takes beyond a mixture's keys.
+inline constexpr std::array<std::string_view, 2> cubicGas{"components", "binary_interaction"};
+inline constexpr std::array<std::string_view, 5> ownGas{"critical_temperature", "critical_pressure", "acentric_factor",
+                                                        "molar_mass", "heat_capacity"};
+inline constexpr std::array<std::string_view, 3> heatCapacity{"cp_over_R", "from", "to"};
 inline constexpr std::array<std::string_view, 2> referenceGas{"model", "fluid"};
 } // namespace keys
 

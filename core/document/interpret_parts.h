@@ -3,6 +3,8 @@
 
 #include "core/analysis/envelope.h"
 #include "core/document/fields.h"
+#include "core/document/known_gases.h"
+#include "core/gas/library/cubic_gas.h"
 #include "core/gas/library/library.h"
 #include "core/path/input.h"
 
@@ -13,12 +15,24 @@ using Warnings = std::vector<Warning>;
 
 [[nodiscard]] Outcome<gas::GasPtr> gasFrom(const Place &place, const gas::Library &library, Warnings &warnings);
 
+/// `peng-robinson` and `soave-redlich-kwong`, a user's own gases included.
+[[nodiscard]] Outcome<gas::GasPtr> cubicFrom(const Fields &fields, gas::CubicForm form, const gas::Library &library,
+                                             Warnings &warnings);
+
 /// A composition by mole fractions or by mass, sorted by name, fractions summing to 1 (Reason::contradiction where they
 /// are further from it than 1e-4; normalised with a warning else).
 enum class FractionBasis { amount, mass };
-/// `model`: whose gases and molar masses.
-[[nodiscard]] Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis basis, std::string_view model,
-                                                        const gas::Library &library, Warnings &warnings);
+/// `gases`: what the names mean.
+[[nodiscard]] Outcome<gas::Composition> compositionFrom(const Place &place, FractionBasis basis,
+                                                        const KnownGases &gases, Warnings &warnings);
+/// A composition and the place it stands at.
+struct PlacedComposition {
+    Place place;
+    gas::Composition composition;
+};
+/// `composition` or `composition_by_mass` of a gas, whichever is there. Fails with Reason::contradiction where both
+/// are.
+[[nodiscard]] Outcome<PlacedComposition> mixtureFrom(const Fields &fields, const KnownGases &gases, Warnings &warnings);
 /// "air", the single component's name, else "nitrogen 0.70, oxygen 0.30" with the largest share first.
 [[nodiscard]] std::string mixtureName(const gas::Composition &composition);
 

@@ -1,6 +1,7 @@
 #include "core/path/audit.h"
 
 #include "core/path/along_curve.h"
+#include "core/path/phase_crossings.h"
 
 #include <algorithm>
 #include <cmath>
@@ -15,34 +16,51 @@ struct Changes {
     double entropy;        ///< [J/K]
 };
 
-/// ∫(T (∂p/∂T)_v − p) dv and ∫(∂p/∂T)_v dv at T₁, then ∫c_v dT and ∫c_v/T dT at v₂.
+/// ∫ of what T and v change along one stretch, each integral split where the integrand bends or jumps.
+Outcome<Changes> changesAlong(const QuasiStaticCurve &curve)
+{
+    auto breaks = seamCrossings(curve, {});
+    if (!breaks) return breaks.failure();
+    const double end = curve.endCoordinate();
+    for (const CrossingPoint &point : phaseCrossings(curve, 0.0, end)) breaks->push_back(point.coordinate);
+    std::ranges::sort(*breaks, [&](double a, double b) { return end > 0.0 ? a < b : a > b; });
+    const auto energy = integral(curve, 0.0, end, *breaks, [](const CurveState &c) {
+        return c.state.isochoricHeatCapacity * c.dTdx +
+               (c.state.temperature * c.state.dpdT - c.state.pressure) * c.dvdx;
+    });
+    const auto entropy = integral(curve, 0.0, end, *breaks, [](const CurveState &c) {
+        return c.state.isochoricHeatCapacity / c.state.temperature * c.dTdx + c.state.dpdT * c.dvdx;
+    });
+    if (!energy) return energy.failure();
+    if (!entropy) return entropy.failure();
+    return Changes{curve.amount() * *energy, curve.amount() * *entropy};
+}
+
+/// Along `first` from the start, then along the other of isotherm and isochore to the end.
+Outcome<Changes> changesByWayOf(const Law &first, const gas::State &from, const gas::State &to)
+{
+    const double lnV = std::log(to.molar().molarVolume / from.molar().molarVolume);
+    const double lnT = std::log(to.molar().temperature / from.molar().temperature);
+    const bool isothermFirst = std::holds_alternative<ConstantTemperature>(first);
+    const QuasiStaticCurve one(from.sharedGas(), from.amount(), from.molar(), first, isothermFirst ? lnV : lnT);
+    const auto corner = one.at(one.endCoordinate());
+    if (!corner) return corner.failure();
+    const Law second = isothermFirst ? Law(ConstantVolume{}) : Law(ConstantTemperature{});
+    const QuasiStaticCurve two(from.sharedGas(), from.amount(), corner->state, second, isothermFirst ? lnT : lnV);
+    const auto a = changesAlong(one);
+    if (!a) return a;
+    const auto b = changesAlong(two);
+    if (!b) return b;
+    return Changes{a->internalEnergy + b->internalEnergy, a->entropy + b->entropy};
+}
+
+/// du = c_v dT + (T (∂p/∂T)_v − p) dv and ds = c_v/T dT + (∂p/∂T)_v dv, integrated from one state to the other. A
+/// corner beyond the model is gone round by the other.
 Outcome<Changes> changesByQuadrature(const gas::State &from, const gas::State &to)
 {
-    const gas::MolarState &a = from.molar();
-    const gas::MolarState &b = to.molar();
-    const double n = from.amount();
-    const QuasiStaticCurve isotherm(from.sharedGas(), n, a, ConstantTemperature{},
-                                    std::log(b.molarVolume / a.molarVolume));
-    const auto corner = isotherm.at(isotherm.endCoordinate());
-    if (!corner) return corner.failure();
-    const QuasiStaticCurve isochore(from.sharedGas(), n, corner->state, ConstantVolume{},
-                                    std::log(b.temperature / a.temperature));
-    const auto seams = seamCrossings(isochore, {});
-    if (!seams) return seams.failure();
-
-    const auto energyAtT = integral(isotherm, 0.0, isotherm.endCoordinate(), {}, [](const CurveState &c) {
-        return (c.state.temperature * c.state.dpdT - c.state.pressure) * c.dvdx;
-    });
-    const auto entropyAtT = integral(isotherm, 0.0, isotherm.endCoordinate(), {},
-                                     [](const CurveState &c) { return c.state.dpdT * c.dvdx; });
-    const auto energyAtV = integral(isochore, 0.0, isochore.endCoordinate(), *seams,
-                                    [](const CurveState &c) { return c.state.isochoricHeatCapacity * c.dTdx; });
-    const auto entropyAtV = integral(isochore, 0.0, isochore.endCoordinate(), *seams, [](const CurveState &c) {
-        return c.state.isochoricHeatCapacity / c.state.temperature * c.dTdx;
-    });
-    for (const auto *part : {&energyAtT, &entropyAtT, &energyAtV, &entropyAtV})
-        if (!*part) return part->failure();
-    return Changes{n * (*energyAtT + *energyAtV), n * (*entropyAtT + *entropyAtV)};
+    const auto changes = changesByWayOf(ConstantTemperature{}, from, to);
+    if (changes) return changes;
+    return changesByWayOf(ConstantVolume{}, from, to);
 }
 
 } // namespace

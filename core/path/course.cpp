@@ -3,6 +3,7 @@
 #include "core/gas/solve/solve.h"
 #include "core/path/arrival.h"
 #include "core/path/end_on_law.h"
+#include "core/path/phase_crossings.h"
 #include "core/path/quasi_static.h"
 
 #include <algorithm>
@@ -64,6 +65,9 @@ Outcome<Course> endingOn(const Law &law, const gas::State &from, const ResolvedS
     if (segment.arrival) return arrivingOn(law, from, segment);
     const auto &[key, value] = segment.ends.front();
     auto end = endOnLaw(from, law, key, value, segment.direction);
+    if (!end && !computesTwoPhaseStates(from.gas()))
+        if (const auto dew = firstCondensation(from, law)) // why the end is not reached
+            return at("/end/" + std::string(keyOf(key)), condensesAt(*dew, from.amount()));
     if (!end) return end.failure();
     return Course{law, end->coordinate, end->state, std::nullopt, std::move(end->remarks)};
 }

@@ -43,7 +43,14 @@ std::optional<IdealGasFigures> idealGasFigures(const SegmentResult &real, const 
     const auto start = gas::stateFrom(*ideal, {gas::Property::pressure, real.from.pressure()},
                                       {gas::Property::temperature, real.from.molar().temperature});
     if (!start) return std::nullopt;
-    const auto result = byKind(gas::State(ideal, real.from.amount(), *start), segment, surroundings);
+    ResolvedSegment same = segment;
+    if (segment.arrival) { // its end as written: the pressure and the volume of that state
+        const auto end = gas::stateFrom(*ideal, {gas::Property::pressure, segment.arrival->pressure()},
+                                        {gas::Property::molarVolume, segment.arrival->molar().molarVolume});
+        if (!end) return std::nullopt;
+        same.arrival = gas::State(ideal, segment.arrival->amount(), *end);
+    }
+    const auto result = byKind(gas::State(ideal, real.from.amount(), *start), same, surroundings);
     if (!result) return std::nullopt;
     return IdealGasFigures{result->work, result->heat, result->to.molar().temperature};
 }
@@ -62,17 +69,39 @@ void addDerivedFigures(SegmentResult &r, const ResolvedSegment &segment, const S
     r.idealGas = idealGasFigures(r, segment, surroundings);
 }
 
+/// The warning with what is published of the uncertainty, if anything is.
+Message withUncertainty(Message message, const gas::Gas &gas)
+{
+    const std::string &uncertainty = gas.validity().uncertainty;
+    if (uncertainty.empty()) return message;
+    return because(std::move(message), {"published uncertainty: {0}", {uncertainty}});
+}
+
 void warnOutsideRange(SegmentResult &r)
 {
-    const gas::Range &valid = r.from.gas().validity().valid;
+    const gas::Gas &gas = r.from.gas();
+    const gas::Range &valid = gas.validity().valid;
     const Interval &T = r.extrema.temperature;
-    if (T.lowest < valid.lowestTemperature || T.highest > valid.highestTemperature)
+    const bool isBeyondTemperature = T.lowest < valid.lowestTemperature || T.highest > valid.highestTemperature;
+    if (isBeyondTemperature && gas.isIdeal())
         r.warnings.push_back(
             {"the gas is between {0} and {1}, beyond the published range of its heat capacity from {2} to {3}; "
              "the heat capacity at the end of the range is used there",
              {Figure{Quantity::temperature, T.lowest}, Figure{Quantity::temperature, T.highest},
               Figure{Quantity::temperature, valid.lowestTemperature},
               Figure{Quantity::temperature, valid.highestTemperature}}});
+    if (isBeyondTemperature && !gas.isIdeal())
+        r.warnings.push_back(
+            withUncertainty({"the gas is between {0} and {1}, beyond the range of its equation from {2} to {3}",
+                             {Figure{Quantity::temperature, T.lowest}, Figure{Quantity::temperature, T.highest},
+                              Figure{Quantity::temperature, valid.lowestTemperature},
+                              Figure{Quantity::temperature, valid.highestTemperature}}},
+                            gas));
+    if (r.extrema.pressure.highest > valid.highestPressure)
+        r.warnings.push_back(withUncertainty({"the gas reaches {0}, beyond the range of its equation up to {1}",
+                                              {Figure{Quantity::pressure, r.extrema.pressure.highest},
+                                               Figure{Quantity::pressure, valid.highestPressure}}},
+                                             gas));
 }
 
 Outcome<SegmentResult> computedSegment(const Segment &said, std::span<const StateResult> states,

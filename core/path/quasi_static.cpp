@@ -2,6 +2,7 @@
 
 #include "core/path/along_curve.h"
 #include "core/path/audit.h"
+#include "core/path/phase_crossings.h"
 #include "core/path/sample.h"
 
 #include <algorithm>
@@ -74,6 +75,10 @@ public:
         r.exponent = m_course.exponent;
         r.warnings = m_course.remarks;
         r.curve = m_curve;
+        const auto crossings = phaseCrossings(*m_curve, 0.0, end());
+        if (!crossings.empty() && !computesTwoPhaseStates(m_from.gas()))
+            return at("/end", condensesAt(crossings.front(), m_from.amount()));
+        markCrossings(crossings, r);
         if (mayTurnTemperature(*m_curve)) {
             const auto turns = signChanges(*m_curve, 0.0, end(), temperatureSlope);
             if (!turns) return at("/end", turns.failure());
@@ -82,6 +87,8 @@ public:
         const auto seams = seamCrossings(*m_curve, m_temperatureTurns);
         if (!seams) return at("/end", seams.failure());
         m_breaks = *seams;
+        for (const CrossingPoint &point : crossings) m_breaks.push_back(point.coordinate);
+        std::ranges::sort(m_breaks, [&](double a, double b) { return end() > 0.0 ? a < b : a > b; });
 
         const auto work = workAlongCurve();
         if (!work) return at("/end", work.failure());
@@ -97,6 +104,20 @@ public:
     }
 
 private:
+    void markCrossings(const std::vector<CrossingPoint> &crossings, SegmentResult &r) const
+    {
+        for (const CrossingPoint &point : crossings) {
+            r.phaseCrossings.push_back(
+                {gas::State(m_from.sharedGas(), m_from.amount(), point.state), point.entersTwoPhase});
+            r.warnings.push_back({point.entersTwoPhase
+                                      ? "the gas enters the two-phase region at {0} and {1}: from there "
+                                        "on liquid and vapour in equilibrium are computed"
+                                      : "the gas leaves the two-phase region at {0} and {1}",
+                                  {Figure{units::Quantity::pressure, point.state.pressure},
+                                   Figure{units::Quantity::temperature, point.state.temperature}}});
+        }
+    }
+
     [[nodiscard]] double end() const { return m_course.endCoordinate; }
 
     [[nodiscard]] Outcome<double> workAlongCurve() const
@@ -183,9 +204,11 @@ Outcome<SegmentResult> quasiStatic(const gas::State &from, const ResolvedSegment
 Outcome<double> workAlong(const gas::State &from, const Law &law, double endCoordinate)
 {
     const QuasiStaticCurve curve(from.sharedGas(), from.amount(), from.molar(), law, endCoordinate);
-    const auto seams = seamCrossings(curve, {});
-    if (!seams) return seams.failure();
-    const auto work = integral(curve, 0.0, endCoordinate, *seams, workPerCoordinate);
+    auto breaks = seamCrossings(curve, {});
+    if (!breaks) return breaks.failure();
+    for (const CrossingPoint &point : phaseCrossings(curve, 0.0, endCoordinate)) breaks->push_back(point.coordinate);
+    std::ranges::sort(*breaks, [&](double a, double b) { return endCoordinate > 0.0 ? a < b : a > b; });
+    const auto work = integral(curve, 0.0, endCoordinate, *breaks, workPerCoordinate);
     if (!work) return work;
     return from.amount() * *work;
 }

@@ -40,13 +40,17 @@ struct StateOnLaw {
     Outcome<CurveState> operator()(const ConstantTemperature &) const
     {
         const double v = start.molarVolume * std::exp(x);
-        return withSlopes(gas.at(start.temperature, v), 0.0, v);
+        const auto state = gas::stateAt(gas, start.temperature, v);
+        if (!state) return state.failure();
+        return withSlopes(*state, 0.0, v);
     }
     Outcome<CurveState> operator()(const ConstantPressure &) const { return atPressure(start.pressure, 0.0); }
     Outcome<CurveState> operator()(const ConstantVolume &) const
     {
         const double T = start.temperature * std::exp(x);
-        return withSlopes(gas.at(T, start.molarVolume), T, 0.0);
+        const auto state = gas::stateAt(gas, T, start.molarVolume);
+        if (!state) return state.failure();
+        return withSlopes(*state, T, 0.0);
     }
     Outcome<CurveState> operator()(const ConstantEntropy &) const
     {

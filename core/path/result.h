@@ -67,6 +67,12 @@ struct Drawing {
     bool dashedOutline = false;  ///< the drawn curve's own area is not the work
 };
 
+/// Where a segment meets the phase boundary.
+struct PhaseCrossing {
+    gas::State state;    ///< on the boundary
+    bool entersTwoPhase; ///< false: leaves it
+};
+
 struct SegmentResult {
     Kind kind;
     std::string label;
@@ -92,7 +98,8 @@ struct SegmentResult {
     double amountIn = 0.0;                  ///< [mol]
     std::optional<double> availableWorkOut; ///< [J]
     std::optional<IdealGasFigures> idealGas;
-    std::optional<double> duration; ///< [s]
+    std::optional<double> duration;            ///< [s]
+    std::vector<PhaseCrossing> phaseCrossings; ///< in the order of the path
 
     Extrema extrema{};
     HeatExchange exchange;

@@ -13,13 +13,19 @@ namespace
 
 IdealProperties valueOn(const HeatCapacityPiece &piece, double t)
 {
-    const auto &a = piece.a;
-    const double heatCapacity = a[0] + t * (a[1] + t * (a[2] + t * (a[3] + t * a[4])));
-    const double enthalpy =
-        piece.enthalpyConstant + t * (a[0] + t * (a[1] / 2 + t * (a[2] / 3 + t * (a[3] / 4 + t * a[4] / 5))));
-    const double entropy =
-        piece.entropyConstant + a[0] * std::log(t) + t * (a[1] + t * (a[2] / 2 + t * (a[3] / 3 + t * a[4] / 4)));
-    return {heatCapacity, enthalpy, entropy};
+    // Horner's scheme for all three at once, from the highest power down.
+    double heatCapacity = 0.0;
+    double enthalpy = 0.0;
+    double entropy = 0.0;
+    for (std::size_t k = piece.a.size(); k-- > 0;) {
+        const double a = piece.a[k];
+        const auto power = static_cast<double>(k);
+        heatCapacity = heatCapacity * t + a;
+        enthalpy = enthalpy * t + a / (power + 1.0);
+        if (k > 0) entropy = entropy * t + a / power;
+    }
+    return {heatCapacity, piece.enthalpyConstant + t * enthalpy,
+            piece.entropyConstant + piece.a.front() * std::log(t) + t * entropy};
 }
 
 void joinTo(HeatCapacityPiece &piece, const HeatCapacityPiece &neighbour, double seam)
@@ -35,6 +41,7 @@ void joinTo(HeatCapacityPiece &piece, const HeatCapacityPiece &neighbour, double
 HeatCapacity::HeatCapacity(std::vector<HeatCapacityPiece> pieces) : m_pieces(std::move(pieces))
 {
     assert(!m_pieces.empty());
+    assert(std::ranges::none_of(m_pieces, [](const HeatCapacityPiece &piece) { return piece.a.empty(); }));
     for (std::size_t i = 1; i < m_pieces.size(); ++i) {
         assert(m_pieces[i].from == m_pieces[i - 1].to);
         m_seams.push_back(m_pieces[i].from);
@@ -80,7 +87,8 @@ HeatCapacity weightedSum(const std::vector<const HeatCapacity *> &components, co
             const auto &own = components[c]->pieces();
             const auto piece = std::find_if(own.begin(), own.end(), [&](const auto &p) { return middle <= p.to; });
             assert(piece != own.end());
-            for (std::size_t k = 0; k < sum.a.size(); ++k) sum.a[k] += weights[c] * piece->a[k];
+            if (sum.a.size() < piece->a.size()) sum.a.resize(piece->a.size());
+            for (std::size_t k = 0; k < piece->a.size(); ++k) sum.a[k] += weights[c] * piece->a[k];
         }
         pieces.push_back(sum);
     }

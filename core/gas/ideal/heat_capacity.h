@@ -3,18 +3,17 @@
 
 #include "core/gas/ideal/ideal_function.h"
 
-#include <array>
 #include <vector>
 
 namespace quasistat::gas
 {
 
-/// c_p/R = a₀ + a₁T + … + a₄T⁴ between two temperatures; h/R and s°/R are its integrals ∫c_p dT and ∫c_p/T dT plus a
-/// constant each.
+/// c_p/R = a₀ + a₁T + a₂T² + … between two temperatures, with as many powers as its source has; h/R and s°/R are its
+/// integrals ∫c_p dT and ∫c_p/T dT plus a constant each.
 struct HeatCapacityPiece {
-    double from; ///< [K]
-    double to;   ///< [K]
-    std::array<double, 5> a;
+    double from;                   ///< [K]
+    double to;                     ///< [K]
+    std::vector<double> a;         ///< [1/Kᵏ], at least one
     double enthalpyConstant = 0.0; ///< [K]
     double entropyConstant = 0.0;
 };

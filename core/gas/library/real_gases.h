@@ -11,14 +11,9 @@ namespace quasistat::gas
 /// at its dew line. `data.reference` must be there.
 [[nodiscard]] GasPtr referenceGas(const GasData &data);
 
-/// What GERG-2008 says of itself besides its terms.
-struct GergFacts {
-    double gasConstant;
-    Validity validity;
-    std::string source;
-};
-/// A mixture by GERG-2008. `composition` in the order of `mixture.components`.
-[[nodiscard]] GasPtr gergGas(const GergMixture &mixture, const Composition &composition, const GergFacts &facts,
-                             std::string name);
+/// A mixture by GERG-2008, to its dew line. `composition` in the order of `mixture.components`; `critical`: constants
+/// of each, for the first guesses of the dew line.
+[[nodiscard]] GasPtr gergGas(const GergMixture &mixture, const Composition &composition,
+                             const std::vector<CriticalConstants> &critical, std::string name);
 
 } // namespace quasistat::gas

@@ -2,8 +2,6 @@
 
 #include "core/gas/equation/equation.h"
 
-#include <boost/math/tools/toms748_solve.hpp>
-
 #include <cassert>
 #include <cmath>
 
@@ -12,24 +10,24 @@ namespace quasistat::gas
 
 using units::Quantity;
 
-std::optional<MolarState> dewPoint(const Gas &gas, double temperature)
+std::optional<MolarState> dewPointNear(const Gas &gas, double temperature)
 {
     const Equation &equation = *gas.equation();
     assert(equation.boundary);
+    const auto isUnder = [&](double lnV) { return equation.boundary->temperatureNear(std::exp(lnV)) > temperature; };
     // From the thin side: the first volume at which the boundary is hotter than the gas.
     const double densest = -std::log(equation.highestDensity);
     constexpr double thinnest = 20.0;
     constexpr double step = 0.05;
     for (double x = thinnest; x > densest; x -= step) {
-        if (!(equation.boundary->temperatureNear(std::exp(x)) > temperature)) continue;
-        const auto excess = [&](double lnV) { return equation.boundary->temperatureAt(std::exp(lnV)) - temperature; };
-        const double inside = excess(x);
-        const double outside = excess(x + step);
-        if (!(inside > 0.0 && outside < 0.0)) continue;
-        std::uintmax_t steps = 60;
-        const auto bracket = boost::math::tools::toms748_solve(excess, x, x + step, inside, outside,
-                                                               boost::math::tools::eps_tolerance<double>(45), steps);
-        return homogeneousState(equation, temperature, std::exp(0.5 * (bracket.first + bracket.second)));
+        if (!isUnder(x)) continue;
+        double under = x;
+        double outside = x + step;
+        for (int i = 0; i < 40; ++i) {
+            const double middle = 0.5 * (under + outside);
+            (isUnder(middle) ? under : outside) = middle;
+        }
+        return homogeneousState(equation, temperature, std::exp(outside));
     }
     return std::nullopt;
 }
@@ -37,10 +35,10 @@ std::optional<MolarState> dewPoint(const Gas &gas, double temperature)
 Failure condenses(const Gas &gas, const MolarState &state)
 {
     const Figure temperature{Quantity::temperature, state.temperature};
-    if (const auto dew = dewPoint(gas, state.temperature))
+    if (const auto dew = dewPointNear(gas, state.temperature))
         return {Reason::condenses,
                 "",
-                {"the gas condenses: at {0} its dew point is {1}, where this model stops",
+                {"the gas condenses: at {0} its dew point is about {1}, where this model stops",
                  {temperature, Figure{Quantity::pressure, dew->pressure}}}};
     return {
         Reason::condenses,

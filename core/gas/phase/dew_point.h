@@ -6,9 +6,9 @@
 namespace quasistat::gas
 {
 
-/// The dew point at the temperature of a state under the boundary: v and p where the first liquid forms; none where the
+/// The dew point at T [K] as near as the boundary is interpolated: v and p where the first liquid forms; none where the
 /// boundary is not met from the thin side. `gas` must have a boundary.
-[[nodiscard]] std::optional<MolarState> dewPoint(const Gas &gas, double temperature);
+[[nodiscard]] std::optional<MolarState> dewPointNear(const Gas &gas, double temperature);
 
 /// Reason::condenses, naming the dew point at the state's temperature.
 [[nodiscard]] Failure condenses(const Gas &gas, const MolarState &state);

@@ -23,10 +23,15 @@ public:
     };
     [[nodiscard]] virtual Critical critical(std::size_t component) const = 0;
 
-    /// ln φᵢ of every component at T [K], ρ [mol/m³] and mole fractions x (> 0, sum 1) of the homogeneous mixture:
-    /// ln φᵢ = (∂(n α^r)/∂nᵢ)_{T,V} − ln Z. Requires p > 0 there.
-    virtual void lnFugacityCoefficients(double temperature, double density, std::span<const double> fractions,
-                                        std::span<double> result) const = 0;
+    /// Φᵢ = (∂(n α^r)/∂nᵢ)_{T,V} of every component at T [K], ρ [mol/m³] and mole fractions x (> 0, sum 1) of the
+    /// homogeneous mixture: ln fᵢ = ln(xᵢ ρ R T) + Φᵢ. Has a meaning where p ≤ 0 too, as searches need it. `result`:
+    /// one for each component. Returns the pressure [Pa] of the same state.
+    virtual double residualPotentials(double temperature, double density, std::span<const double> fractions,
+                                      std::span<double> result) const = 0;
+    /// ln φᵢ = Φᵢ − ln Z. Requires p > 0 there.
+    void lnFugacityCoefficients(double temperature, double density, std::span<const double> fractions,
+                                std::span<double> result) const;
+
     /// Pressure [Pa] and (∂p/∂ρ)_T [Pa m³/mol] of the homogeneous mixture.
     struct PressureSlope {
         double pressure;

@@ -30,6 +30,7 @@ template <class Function>
         if (std::isnan(value)) return std::nullopt;
         (value < 0.0 ? low : high) = x;
         double next = x - value / slope;
+        if (std::abs(next - x) <= rounding * std::abs(x)) return x;
         if (!(next > low && next < high)) // also where the slope is zero or not a number
             next = 0.5 * (low + high);
         else if (std::abs(next - x) > 0.5 * lastStep && i > 8) // Newton runs in circles

@@ -149,7 +149,7 @@ public:
             const double slope = other.property == Property::enthalpy ? -v * v * dpdv : v * s->pressure;
             return {valueOf(other.property, *s) - other.value, slope};
         };
-        const auto range = volumesOnIsentrope(entropy);
+        const auto range = bracketOnIsentrope(entropy, other);
         if (!range) return std::nullopt;
         const auto x = risingRoot(excess, -range->second, -range->first, 0.0);
         if (!x) return std::nullopt;
@@ -157,13 +157,27 @@ public:
     }
 
 private:
-    /// ln v between the hottest and the coldest state of an isentrope that the model has.
-    std::optional<std::pair<double, double>> volumesOnIsentrope(double entropy) const
+    /// Two values of ln v, ascending, between which `other` passes its value: from the coldest state of the isentrope
+    /// towards the dense side, in steps that grow.
+    std::optional<std::pair<double, double>> bracketOnIsentrope(double entropy, Given other) const
     {
-        const auto hot = onIsotherm(0.5 * m_hottest, {Property::entropy, entropy});
-        const auto cold = onIsotherm(m_coldest * (1.0 + 1e-12), {Property::entropy, entropy});
-        if (!hot || !cold || !(hot->molarVolume < cold->molarVolume)) return std::nullopt;
-        return std::pair(std::log(hot->molarVolume), std::log(cold->molarVolume));
+        const auto coldest = onIsotherm(m_coldest * (1.0 + 1e-12), {Property::entropy, entropy});
+        if (!coldest || valueOf(other.property, *coldest) > other.value) return std::nullopt;
+        const double densest = -std::log(m_equation.highestDensity);
+        double large = std::log(coldest->molarVolume);
+        double step = 1e-3;
+        while (large > densest && step > 1e-6) {
+            const double small = std::max(large - step, densest);
+            const auto state = onIsochore(std::exp(small), {Property::entropy, entropy});
+            if (!state) { // hotter there than the model goes
+                step *= 0.25;
+                continue;
+            }
+            if (valueOf(other.property, *state) >= other.value) return std::pair(small, large);
+            large = small;
+            step *= 1.5;
+        }
+        return std::nullopt;
     }
 
     const Gas &m_gas;

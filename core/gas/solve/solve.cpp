@@ -3,6 +3,7 @@
 #include "core/gas/constants.h"
 #include "core/gas/equation/equation.h"
 #include "core/gas/phase/dew_point.h"
+#include "core/gas/phase/saturation.h"
 #include "core/gas/solve/density.h"
 #include "core/gas/solve/equilibrium.h"
 #include "core/gas/solve/newton.h"
@@ -87,11 +88,17 @@ std::optional<MolarState> realState(const Gas &gas, Given first, Given second, c
             return homogeneousState(equation, *T, *v);
         }
     }
-    if (!guess || !guess->vapourFraction) {
-        const auto state = newton(gas, first, second, realStart(gas, first, second, guess));
-        if (state && state->dpdv < 0.0 && isOnEquilibriumSurface(equation, *state)) return state;
-    }
-    return equilibriumState(gas, first, second);
+    // Below the critical temperature an isotherm passes the same entropy in homogeneous states that are not there, too:
+    // the saturated phases come first.
+    const bool mayMislead = (guess && guess->vapourFraction) ||
+                            (T && equation.saturation && *T < equation.saturation->criticalTemperature());
+    std::optional<MolarState> quick;
+    if (!mayMislead) quick = newton(gas, first, second, realStart(gas, first, second, guess));
+    if (quick && quick->dpdv < 0.0 && insideModel(gas, *quick) && isOnEquilibriumSurface(equation, *quick))
+        return quick;
+    if (const auto state = equilibriumState(gas, first, second)) return state;
+    if (quick && !insideModel(gas, *quick)) return quick; // whoever asked will say what bounds the model
+    return std::nullopt;
 }
 
 } // namespace
