@@ -68,7 +68,10 @@ Outcome<gas::GasPtr> referenceGasFrom(const Fields &fields, const gas::Library &
 
 } // namespace
 
-Outcome<gas::GasPtr> gasFrom(const Place &place, const gas::Library &library, Warnings &warnings)
+namespace
+{
+
+Outcome<gas::GasPtr> gasMadeFrom(const Place &place, const gas::Library &library, Warnings &warnings)
 {
     const Outcome<Fields> fields = Fields::of(place);
     if (!fields) return fields.failure();
@@ -83,6 +86,23 @@ Outcome<gas::GasPtr> gasFrom(const Place &place, const gas::Library &library, Wa
     if (*model == "gerg-2008") return gergFrom(*fields, library, warnings);
     if (*model == "reference") return referenceGasFrom(*fields, library, warnings);
     return unknownName(modelPlace->pointer, "gas model", *model, keys::models);
+}
+
+} // namespace
+
+Outcome<gas::GasPtr> gasFrom(const Place &place, const gas::Library &library, Warnings &warnings)
+{
+    const std::string description =
+        place.pointer + " " + place.value->dump(-1, ' ', false, Json::error_handler_t::replace);
+    if (const auto known = library.recalled(description)) {
+        warnings.insert(warnings.end(), known->warnings.begin(), known->warnings.end());
+        return known->gas;
+    }
+    Warnings own;
+    Outcome<gas::GasPtr> gas = gasMadeFrom(place, library, own);
+    if (gas) library.remember(description, {*gas, own});
+    warnings.insert(warnings.end(), own.begin(), own.end());
+    return gas;
 }
 
 } // namespace quasistat::document

@@ -28,7 +28,7 @@ public:
     const gas::Composition &composition() const override { return m_true->composition(); }
     const gas::Validity &validity() const override { return m_true->validity(); }
     std::span<const double> seams() const override { return {}; }
-    bool isIdeal() const override { return true; }
+    const gas::Equation *equation() const override { return nullptr; }
     std::string_view model() const override { return "inconsistent"; }
     std::string_view source() const override { return "a test"; }
     const std::string &name() const override { return m_true->name(); }

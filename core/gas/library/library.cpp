@@ -53,7 +53,7 @@ std::string shown(std::string_view name)
 
 } // namespace
 
-Library::Library() : m_store(std::make_unique<GasStore>()) {}
+Library::Library() : m_store(std::make_unique<GasStore>()), m_known(std::make_unique<KnownGases>()) {}
 
 Library::~Library() = default;
 
@@ -204,19 +204,14 @@ Outcome<GergMixture> Library::gergMixture(const Composition &composition) const
     return quasistat::gas::gergMixture(m_store->gergModel(), names, std::move(components));
 }
 
-Outcome<GasPtr> Library::gerg2008(const Composition &composition, std::string name) const
+std::optional<KnownGas> Library::recalled(const std::string &description) const
 {
-    const Outcome<GergMixture> mixture = gergMixture(composition);
-    if (!mixture) return mixture.failure();
-    const GergModel &model = *mixture->model;
-    return gergGas(*mixture, composition, {model.gasConstant(), model.validity(), model.source()}, std::move(name));
+    return m_known->find(description);
 }
 
-Outcome<GasPtr> Library::reference(std::string_view fluid) const
+void Library::remember(const std::string &description, KnownGas gas) const
 {
-    const Outcome<DataPtr> found = data(fluid, "reference");
-    if (!found) return found.failure();
-    return referenceGas(**found);
+    m_known->add(description, std::move(gas));
 }
 
 } // namespace quasistat::gas

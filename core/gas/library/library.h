@@ -3,6 +3,7 @@
 
 #include "core/gas/gas.h"
 #include "core/gas/library/component_facts.h"
+#include "core/gas/library/known_gases.h"
 
 #include <memory>
 #include <vector>
@@ -54,6 +55,11 @@ public:
     /// A single gas by its own published equation; `fluid` is its name.
     [[nodiscard]] Outcome<GasPtr> reference(std::string_view fluid) const;
 
+    /// The gas last made from this description (the text of a document's "gas"), if it is still known: what a gas finds
+    /// out about itself at first use, such as its phase boundary, is then not found out again at every change of a path.
+    [[nodiscard]] std::optional<KnownGas> recalled(const std::string &description) const;
+    void remember(const std::string &description, KnownGas gas) const;
+
 private:
     /// “there is no gas named …”, with the names near it among those of `model` (of all, if that is empty).
     [[nodiscard]] Failure unknown(std::string_view name, std::string_view model) const;
@@ -63,6 +69,7 @@ private:
     [[nodiscard]] std::vector<std::shared_ptr<const GasData>> gases(std::string_view model) const;
 
     std::unique_ptr<GasStore> m_store;
+    std::unique_ptr<KnownGases> m_known;
 };
 
 } // namespace quasistat::gas
