@@ -151,7 +151,9 @@ TEST_F(CommandLine, PartsNotComputedAreRefusedByName)
     const struct {
         const char *name;
         const char *pointer;
-    } rows[] = {{"machines-and-throttle", ": /segments/0/kind: "}, {"matter", ": /segments/0/kind: "}};
+    } rows[] = {{"nitrogen-reference", ": /segments/2/kind: "},
+                {"machines-and-throttle", ": /segments/0/kind: "},
+                {"matter", ": /segments/0/kind: "}};
     for (const auto &row : rows) {
         const Call result = run("compute '" + example + row.name + ".qpath'");
         EXPECT_EQ(result.status, 65) << row.name;
