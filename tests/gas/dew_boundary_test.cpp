@@ -238,6 +238,33 @@ TEST(DewBoundary, ReachesFromThinVapourToLiquid)
     }
 }
 
+TEST(DewBoundary, GoesOnWhereAnotherLiquidTakesOver)
+{
+    // The first drop in the thin gas is mostly ethanol, in the dense one mostly propane: the one branch ends in a cusp
+    // before the other is done.
+    const CubicSubstance ethanol{514.71, 6.268e6, 0.646};
+    for (const double share : {0.002, 0.004, 0.01}) {
+        const std::vector<double> z{0.6, 0.4 - share, share};
+        const std::vector<double> k{0.0, 0.1, 0.1, 0.1, 0.0, 0.1, 0.1, 0.1, 0.0};
+        const auto fluid =
+            std::make_shared<CubicFugacities>(CubicMixture(CubicForm::pengRobinson, {helium, propane, ethanol}, k));
+        const DewBoundary boundary(fluid, z, coldest);
+        EXPECT_LT(boundary.knownVolumes().smallest * fluid->closestPacking(z), 1.1);
+        for (const double v : {5e-2, 5e-3, 5e-4}) {
+            const double T = boundary.temperatureAt(v);
+            ASSERT_GT(T, coldest);
+            EXPECT_NEAR(sumOfTrace(*fluid, z, T, 1.0 / v), 1.0, 1e-8) << share << " " << v;
+        }
+        // No step where they change: the temperatures of neighbouring volumes stay together.
+        double previous = boundary.temperatureAt(0.1);
+        for (double v = 0.1 / 1.01; v > 2e-4; v /= 1.01) {
+            const double T = boundary.temperatureAt(v);
+            EXPECT_NEAR(T, previous, 0.01 * previous) << share << " " << v;
+            previous = T;
+        }
+    }
+}
+
 TEST(DewBoundary, KnowsNoSecondPhaseBelowTheModelsLowestTemperature)
 {
     for (const CubicSubstance &gas : {hydrogen, helium}) {

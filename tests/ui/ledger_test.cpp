@@ -26,6 +26,10 @@ private slots:
     void the_verdict_says_where_the_limit_is_exceeded();
     void limits_are_added_changed_and_removed_in_the_drawer();
     void further_figures_of_the_selected_segment_unfold();
+    void the_ideal_gas_stands_beside_the_real_one();
+    void an_ideal_gas_has_no_spread();
+    void a_vapour_fraction_is_among_the_figures_of_its_state();
+    void a_long_name_stands_above_its_figures();
     void keys_walk_and_open();
 
 private:
@@ -192,6 +196,67 @@ void LedgerTest::further_figures_of_the_selected_segment_unfold()
     QTest::mouseClick(&ledger(), Qt::LeftButton, {}, ledger().placeOf(QStringLiteral("segment")).center());
     QVERIFY(!ledger().placeOf(QStringLiteral("segment.delta_entropy")).isEmpty());
     QVERIFY(!ledger().placeOf(QStringLiteral("segment.lost_work")).isEmpty());
+}
+
+void LedgerTest::the_ideal_gas_stands_beside_the_real_one()
+{
+    session().open(sampleDesign("hydrogen-store"), QString());
+    Snapshot snapshot = session().now();
+    QVERIFY(snapshot.evaluation);
+    analysis::Evaluation evaluation = *snapshot.evaluation;
+    for (path::SegmentResult &segment : evaluation.path.segments)
+        segment.idealGas =
+            path::IdealGasFigures{0.9 * segment.work, 1.2 * segment.heat, *segment.to.temperature() + 4.0};
+    snapshot.evaluation = std::make_shared<const analysis::Evaluation>(evaluation);
+
+    const std::vector<LedgerRow> closed = spreadRows(snapshot, {});
+    QCOMPARE(closed.size(), std::size_t(2));
+    QVERIFY(closed[1].label.unstyled().contains(QStringLiteral("off by up to")));
+    const std::vector<LedgerRow> rows = spreadRows(snapshot, {.figure = {}, .spread = true});
+    QCOMPARE(rows.size(), std::size_t(3 + 3)); // heading, sentence, columns and three segments
+    const LedgerRow &first = rows[3];
+    const QString minus(QChar(0x2212));
+    const QString space(QChar(0x202F));
+    QCOMPARE(first.remarks[0], minus + QStringLiteral("10") + space + QStringLiteral("%"));
+    const bool isHeatIn = evaluation.path.segments[0].heat > 0.0;
+    QCOMPARE(first.remarks[1], (isHeatIn ? QStringLiteral("+") : minus) + QStringLiteral("20") + space +
+                                   QStringLiteral("%"));
+    QCOMPARE(first.remarks[2], QStringLiteral("+4.0") + space + QStringLiteral("K"));
+    const units::Scale scale = accountScale(evaluation.path, snapshot.units);
+    QVERIFY(std::abs(numberOf(first.figures[0]) - 0.9 * evaluation.path.segments[0].work * scale.factor) <
+            std::pow(10.0, -scale.decimals));
+    // Beside the further figures of the selected segment too.
+    QString spoken;
+    for (const LedgerRow &row : segmentFigureRows(snapshot, 0, {.figure = {}, .segmentFigures = true}))
+        spoken += row.spoken() + QLatin1Char('\n');
+    QVERIFY2(spoken.contains(QStringLiteral("as an ideal gas: end T (+4.0")), qPrintable(spoken));
+}
+
+void LedgerTest::an_ideal_gas_has_no_spread()
+{
+    QVERIFY(ledger().placeOf(QStringLiteral("spread")).isEmpty());
+    QVERIFY(spreadRows(session().now(), {.figure = {}, .spread = true}).empty());
+}
+
+void LedgerTest::a_vapour_fraction_is_among_the_figures_of_its_state()
+{
+    session().open(sampleDesign("nitrogen-letdown"), QString());
+    QVERIFY(session().now().evaluation && session().now().evaluation->path.complete());
+    session().select(0);
+    QTest::mouseClick(&ledger(), Qt::LeftButton, {}, ledger().placeOf(QStringLiteral("segment")).center());
+    const LedgerRow *fraction = row(QStringLiteral("segment.vapour_fraction"));
+    QVERIFY(fraction);
+    // An isentrope of nitrogen from 200 bar, 20 °C to 1 atm: about 0.89.
+    QVERIFY(std::abs(numberOf(fraction->figures[0]) - 0.89) < 0.01);
+}
+
+void LedgerTest::a_long_name_stands_above_its_figures()
+{
+    const int one = ledger().placeOf(QStringLiteral("1")).height();
+    const std::string name = "first stage, with the small piston, before the filter";
+    session().apply(withValue(session().now().design, "/segments/0/label", name), QStringLiteral("edit"));
+    QVERIFY(ledger().placeOf(QStringLiteral("1")).height() > one);
+    QCOMPARE(ledger().placeOf(QStringLiteral("2")).height(), one);
 }
 
 void LedgerTest::keys_walk_and_open()

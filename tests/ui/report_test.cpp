@@ -53,6 +53,7 @@ class ReportTest : public QObject
     Q_OBJECT
 private slots:
     void its_text_holds_the_figures_of_the_evaluation();
+    void a_real_gas_is_named_with_source_range_and_uncertainty();
     void its_fonts_are_embedded_and_its_diagram_is_vectors();
     void the_design_comes_back_out_of_it();
     void letter_paper_is_letter_paper();
@@ -92,6 +93,25 @@ void ReportTest::its_text_holds_the_figures_of_the_evaluation()
           "GW-021", "second stage", "Exceeded", "Caution", "1 of "})
         QVERIFY2(text.contains(QString::fromUtf8(figure)),
                  qPrintable(QString::fromUtf8(figure) + QLatin1Char('\n') + text));
+}
+
+void ReportTest::a_real_gas_is_named_with_source_range_and_uncertainty()
+{
+    Snapshot snapshot = snapshotOf(sample("nitrogen-letdown"));
+    QVERIFY(snapshot.evaluation);
+    analysis::Evaluation evaluation = *snapshot.evaluation;
+    evaluation.path.segments[0].idealGas = path::IdealGasFigures{-1.2345e6, 0.0, 65.43};
+    snapshot.evaluation = std::make_shared<const analysis::Evaluation>(evaluation);
+    const auto bytes = report(snapshot, {PageSize::a4, QStringLiteral("0.1.0"), QStringLiteral("a design.qpath")});
+    QVERIFY(bytes);
+    QFile file(m_folder.filePath(QStringLiteral("real.pdf")));
+    QVERIFY(file.open(QIODevice::WriteOnly));
+    file.write(*bytes);
+    file.close();
+    const QString text = textOf(file.fileName()).simplified();
+    for (const char *words :
+         {"nitrogen, reference equation", "Span", "Published range", "Model spread", "off by", "vapour x", "0.89"})
+        QVERIFY2(text.contains(QString::fromUtf8(words)), qPrintable(QString::fromUtf8(words) + text));
 }
 
 void ReportTest::its_fonts_are_embedded_and_its_diagram_is_vectors()

@@ -210,7 +210,8 @@ void Diagram::prepare()
 {
     const Plane plane{plotRect(), m_view};
     const AxisScene axes = axisScene(plane);
-    m_scene = sceneOf(m_snapshot ? *m_snapshot : Snapshot{}, plane, axes, m_style);
+    const SnapshotPtr snapshot = m_snapshot ? m_snapshot : std::make_shared<const Snapshot>();
+    m_scene = sceneOf(*snapshot, plane, axes, m_style, m_phases.linesFor(*snapshot));
 }
 
 void Diagram::paintTo(QPainter &painter) const

@@ -1,6 +1,7 @@
 #pragma once
 // The p–V diagram: draws a snapshot at any size, in the window and on paper. Knows no session and no gesture.
 
+#include "ui/canvas/phase_scene.h"
 #include "ui/canvas/scene.h"
 #include "ui/canvas/strata.h"
 #include "ui/canvas/ticks.h"
@@ -56,6 +57,7 @@ private:
     Emphasis m_emphasis;
     View m_view;
     int m_inset = 0;
+    PhaseCache m_phases;
     Scene m_scene;
     QSharedPointer<EngineeringTicker> m_volumeTicker;
     QSharedPointer<EngineeringTicker> m_pressureTicker;

@@ -78,10 +78,12 @@ public:
         Waiting waiting;
         addNet(waiting);
         addStates(waiting);
+        addCrossings(waiting);
         for (const auto &label : beside) addBoundary(waiting, label);
         addFailure(waiting);
         if (m_style.isPrint()) addSegments(waiting);
         addLimits(waiting);
+        addCritical(waiting);
         return waiting;
     }
 
@@ -112,6 +114,12 @@ private:
                 text.lines.append({RichText::plain(withUnit(state.pressure(), pressure)), {}, m_medium});
                 if (const auto degrees = state.temperature())
                     text.lines.append({RichText::plain(withUnit(*degrees, temperature)), {}, m_plain, 0.8});
+                if (!state.isEvacuated() && state.molar().vapourFraction)
+                    text.lines.append({RichText::marked(QStringLiteral("<i>x</i> ")) +
+                                           RichText::plain(QString::number(*state.molar().vapourFraction, 'f', 3)),
+                                       {},
+                                       m_plain,
+                                       0.8});
             }
             waiting.add(text,
                         {.size = {},
@@ -148,6 +156,36 @@ private:
         text.colour = m_style.palette.envelope.colour;
         text.lines.append({loose.text, {}, m_strong});
         waiting.add(text, {.size = {}, .anchors = {loose.anchor}, .clearance = 6.0});
+    }
+
+    // Where segments meet the phase boundary.
+    void addCrossings(Waiting &waiting) const
+    {
+        for (const CrossingScene &crossing : m_scene.crossings) {
+            LabelScene text = label();
+            const QString pressure = QString::fromStdString(
+                units::shown(crossing.pressure, units::Quantity::pressure, m_snapshot.units));
+            text.lines.append({RichText::plain((crossing.entersTwoPhase ? tr("enters two phases, %1")
+                                                                        : tr("leaves two phases, %1"))
+                                                   .arg(pressure)),
+                               {},
+                               m_plain,
+                               0.9});
+            waiting.add(text, {.size = {}, .anchors = {crossing.centre}, .clearance = 8.0});
+        }
+    }
+
+    void addCritical(Waiting &waiting) const
+    {
+        if (!m_scene.phase.critical) return;
+        LabelScene text = label();
+        text.plateOpacity = 0.7;
+        text.lines.append({RichText::plain(tr("critical point")), {}, m_plain, 0.75});
+        waiting.add(text, {.size = {},
+                           .anchors = {*m_scene.phase.critical},
+                           .clearance = 6.0,
+                           .farthest = 30.0,
+                           .optional = true});
     }
 
     // What stops the path, beside the last state reached.
@@ -261,6 +299,13 @@ Occupied occupied(const Scene &scene)
     result.lines = linesOf(scene);
     for (const auto &segment : scene.segments)
         for (const auto &piece : segment.limit) result.quiet.push_back(piece);
+    for (const auto &piece : scene.phase.boundary) result.quiet.push_back(piece);
+    if (scene.phase.critical)
+        result.blocks.push_back(QRectF(*scene.phase.critical - QPointF(4, 4), QSizeF(8, 8)));
+    for (const auto &crossing : scene.crossings) {
+        result.things.push_back(crossing.centre);
+        result.blocks.push_back(QRectF(crossing.centre - QPointF(5, 5), QSizeF(10, 10)));
+    }
     for (const auto &handle : scene.handles) result.things.push_back(handle.centre);
     for (const auto &handle : scene.handles)
         result.blocks.push_back(QRectF(handle.centre - QPointF(7, 7), QSizeF(14, 14)));

@@ -3,6 +3,7 @@
 #include "core/units/display.h"
 #include "ui/canvas/boundary_scene.h"
 #include "ui/canvas/labels.h"
+#include "ui/canvas/phase_scene.h"
 #include "ui/canvas/pixel_geometry.h"
 #include "ui/canvas/segment_scenes.h"
 
@@ -57,7 +58,8 @@ int Scene::segmentAt(QPointF point, double reach) const
     return found;
 }
 
-Scene sceneOf(const Snapshot &snapshot, const Plane &plane, const AxisScene &axes, const DiagramStyle &style)
+Scene sceneOf(const Snapshot &snapshot, const Plane &plane, const AxisScene &axes, const DiagramStyle &style,
+              const analysis::PhaseLines *phases)
 {
     Scene scene;
     scene.plane = plane;
@@ -71,11 +73,14 @@ Scene sceneOf(const Snapshot &snapshot, const Plane &plane, const AxisScene &axe
     scene.segments = segmentScenes(path, plane, style);
     addNetArea(scene, path, style);
     scene.handles = handleScenes(path, plane);
+    if (phases) scene.phase = phaseScene(*phases, plane);
+    scene.crossings = crossingScenes(path, plane);
     QList<LooseLabel> beside;
     std::vector<QPolygonF> avoid = linesOf(scene);
     for (const auto &handle : scene.handles) avoid.push_back(roomOf(handle));
     scene.boundary = boundaryScene(snapshot, plane, style, avoid, beside);
     addLabels(scene, snapshot, style, beside);
+    addFractionLabels(scene, style);
     return scene;
 }
 

@@ -2,6 +2,7 @@
 // Everything drawn on the diagram, in pixels: made once for a snapshot, a view and a size; painting only walks through
 // it.
 
+#include "core/analysis/phase_lines.h"
 #include "ui/canvas/diagram_style.h"
 #include "ui/canvas/label_placement.h"
 #include "ui/canvas/plane.h"
@@ -66,6 +67,34 @@ struct BoundaryScene {
     QList<QPolygonF> violated;
 };
 
+/// A line of equal vapour fraction, cut to the plot.
+struct FractionLine {
+    QPolygonF line;
+    double vapourFraction;
+};
+/// Its figure, standing on it.
+struct FractionLabel {
+    QRectF plate;
+    QString text;
+};
+
+/// The phase boundary as far as it comes into the plot.
+struct PhaseScene {
+    QPolygonF inside; ///< of the dome
+    QList<QPolygonF> boundary;
+    QList<FractionLine> fractions;
+    QList<FractionLabel> fractionLabels;
+    std::optional<QPointF> critical;
+};
+
+/// Where a segment meets the phase boundary.
+struct CrossingScene {
+    QPointF centre;
+    int segment = 0; ///< from 0
+    bool entersTwoPhase = true;
+    double pressure = 0.0; ///< [Pa]
+};
+
 struct LabelLine {
     RichText text;
     QString figure; ///< at the right end of the plate
@@ -92,6 +121,8 @@ struct Scene {
     QList<QLineF> netDots;
     bool netWorkIn = false;
     QList<HandleScene> handles;
+    PhaseScene phase;
+    QList<CrossingScene> crossings;
     BoundaryScene boundary;
     QList<LabelScene> labels;
     QString sentence; ///< why there is nothing to draw
@@ -102,8 +133,9 @@ struct Scene {
     [[nodiscard]] int segmentAt(QPointF point, double reach) const;
 };
 
-/// The scene of `snapshot` on `plane` with axes ticked as given. Evaluates nothing.
+/// The scene of `snapshot` on `plane` with axes ticked as given; `phases`: the boundary of its gas, or null. Evaluates
+/// nothing.
 [[nodiscard]] Scene sceneOf(const Snapshot &snapshot, const Plane &plane, const AxisScene &axes,
-                            const DiagramStyle &style);
+                            const DiagramStyle &style, const analysis::PhaseLines *phases = nullptr);
 
 } // namespace quasistat::ui

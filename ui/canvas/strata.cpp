@@ -76,6 +76,38 @@ void paintAreas(QPainter &painter, const Painting &p)
     for (const auto &segment : p.scene.segments) drawDots(painter, segment.dots, faded(palette.workOut.colour, 0.7));
 }
 
+void drawDiamond(QPainter &painter, QPointF centre, double reach)
+{
+    painter.drawPolygon(QPolygonF{centre + QPointF(0, -reach), centre + QPointF(reach, 0), centre + QPointF(0, reach),
+                                  centre + QPointF(-reach, 0)});
+}
+
+void paintPhases(QPainter &painter, const Painting &p)
+{
+    const PhaseScene &phase = p.scene.phase;
+    const QColor &ink = p.style.palette.ink;
+    const QColor &ground = p.style.palette.ground;
+    painter.setPen(Qt::NoPen);
+    painter.setBrush(faded(ink, p.style.palette.scheme == Scheme::dark ? 0.06 : 0.04));
+    painter.drawPolygon(phase.inside);
+    painter.setBrush(Qt::NoBrush);
+    painter.setPen(QPen(faded(ink, 0.26), 0.8));
+    for (const FractionLine &fraction : phase.fractions) painter.drawPolyline(fraction.line);
+    painter.setPen(rounded(faded(ink, 0.62), p.style.isPrint() ? 1.2 : 1.5));
+    drawLines(painter, phase.boundary);
+    const QFont font = p.style.font(p.style.type(10));
+    for (const FractionLabel &label : phase.fractionLabels) {
+        painter.fillRect(label.plate, faded(ground, 0.82));
+        painter.setPen(faded(ink, 0.7));
+        drawText(painter, label.plate.center() + QPointF(0.0, 0.36 * font.pixelSize()), label.text, font,
+                 Align::centre);
+    }
+    if (!phase.critical) return;
+    painter.setPen(Qt::NoPen);
+    painter.setBrush(faded(ink, 0.8));
+    painter.drawEllipse(*phase.critical, 3.0, 3.0);
+}
+
 void paintHatch(QPainter &painter, const Painting &p)
 {
     const HatchLook &look = p.style.palette.shortfall;
@@ -212,6 +244,7 @@ void paintHandles(QPainter &painter, const Painting &p)
 {
     painter.setPen(QPen(p.style.palette.ink, 1.5));
     painter.setBrush(p.style.palette.ground);
+    for (const CrossingScene &crossing : p.scene.crossings) drawDiamond(painter, crossing.centre, 4.5);
     const QRectF visible = p.scene.plane.rect.adjusted(-6, -6, 6, 6);
     const double radius = p.style.purpose == Purpose::report ? 4.0 : handleRadius;
     for (const auto &handle : p.scene.handles)
@@ -246,6 +279,7 @@ void paint(Stratum stratum, QPainter &painter, const Painting &painting)
     case Stratum::forbidden: paintForbidden(painter, painting); break;
     case Stratum::grid: paintGrid(painter, painting); break;
     case Stratum::areas: paintAreas(painter, painting); break;
+    case Stratum::phases: paintPhases(painter, painting); break;
     case Stratum::hatch: paintHatch(painter, painting); break;
     case Stratum::axes: paintAxes(painter, painting); break;
     case Stratum::ghosts: paintGhosts(painter, painting); break;

@@ -11,8 +11,11 @@ namespace quasistat::ui
 {
 
 /// From the bottom to the top. `emphasis` is what follows the pointer and the selection.
-enum class Stratum { forbidden, grid, areas, hatch, axes, ghosts, boundary, halo, curves, emphasis, handles, labels };
-inline constexpr std::array strata{Stratum::forbidden, Stratum::grid,     Stratum::areas,    Stratum::hatch,
+enum class Stratum {
+    forbidden, grid, areas, phases, hatch, axes, ghosts, boundary, halo, curves, emphasis, handles, labels
+};
+inline constexpr std::array strata{Stratum::forbidden, Stratum::grid,     Stratum::areas,    Stratum::phases,
+                                   Stratum::hatch,
                                    Stratum::axes,      Stratum::ghosts,   Stratum::boundary, Stratum::halo,
                                    Stratum::curves,    Stratum::emphasis, Stratum::handles,  Stratum::labels};
 

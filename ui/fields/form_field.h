@@ -3,6 +3,7 @@
 
 #include "core/path/kind.h"
 #include "core/units/quantity.h"
+#include "ui/fields/suggestion.h"
 
 #include <QString>
 
@@ -40,6 +41,7 @@ struct FormField {
     QString value{}; ///< as typed
     QString placeholder{};
     bool optional = false; ///< may be left blank
+    std::vector<Suggestion> suggestions{}; ///< offered while typing
 };
 
 /// Why `text` cannot stand in `field`, as a sentence; empty if it can. Judges the text alone, not what comes of it.

@@ -190,6 +190,7 @@ void FormView::update(const std::vector<FormField> &fields)
         if (!line.value) continue;
         line.value->show(fields[i].value);
         line.value->setPlaceholderText(fields[i].placeholder);
+        if (!fields[i].suggestions.empty()) line.value->setSuggestions(fields[i].suggestions);
     }
 }
 

@@ -211,6 +211,7 @@ std::vector<LedgerRow> accountRows(const Snapshot &snapshot, const LedgerOpen &o
     rows.push_back(heading);
     LedgerRow columns{.kind = LedgerRowKind::columns};
     columns.label = RichText::plain(say("segment"));
+    columns.figures = {QStringLiteral("<i>W</i>"), QStringLiteral("<i>Q</i>"), QStringLiteral("Δ<i>U</i>")};
     rows.push_back(columns);
 
     for (std::size_t k = 0; k < path.failures.size(); ++k) {

@@ -1,4 +1,5 @@
 #include "ui/fields/form_field.h"
+#include "ui/gas/model_spread.h"
 #include "ui/ledger/formulas.h"
 #include "ui/ledger/ledger_rows.h"
 #include "ui/session/design_reading.h"
@@ -147,8 +148,46 @@ void addIrreversibility(FigureList &list, const SegmentResult &segment, const Sn
     list.add("recovery", say("recovery"), segment.recovery, Quantity::number);
 }
 
+/// Beside the real figures, with how far the ideal ones are off.
+void addIdealGas(FigureList &list, const SegmentResult &result, const units::DisplayUnits &units)
+{
+    if (!result.idealGas || result.from.gas().isIdeal()) return;
+    const path::IdealGasFigures &ideal = *result.idealGas;
+    const double sign = shownSign(units);
+    const auto words = [](const QString &symbol, const QString &off) {
+        const QString text = say("as an ideal gas: %1").arg(symbol);
+        return off == QStringLiteral("–") || off.isEmpty() ? text : QStringLiteral("%1 (%2)").arg(text, off);
+    };
+    list.add("ideal_gas_work", words(QStringLiteral("<i>W</i>"), percentOff(ideal.work, result.work, result.audit.scale)),
+             sign * ideal.work, Quantity::energy);
+    list.add("ideal_gas_heat", words(QStringLiteral("<i>Q</i>"), percentOff(ideal.heat, result.heat, result.audit.scale)),
+             sign * ideal.heat, Quantity::energy);
+    const auto end = result.to.temperature();
+    list.add("ideal_gas_end_temperature",
+             words(say("end <i>T</i>"), end ? degreesOff(ideal.endTemperature, *end, units) : QString()),
+             ideal.endTemperature, Quantity::temperature);
+}
+
+void addCrossings(FigureList &list, const SegmentResult &result, const units::DisplayUnits &units)
+{
+    for (const path::PhaseCrossing &crossing : result.phaseCrossings) {
+        const gas::State &state = crossing.state;
+        QString where = shownFigure(state.pressure(), Quantity::pressure, units);
+        if (const auto temperature = state.temperature())
+            where += QStringLiteral(", ") + shownFigure(*temperature, Quantity::temperature, units);
+        list.addText(crossing.entersTwoPhase ? say("enters two phases at") : say("leaves two phases at"), where);
+    }
+}
+
+std::optional<double> vapourFraction(const gas::State &state)
+{
+    return state.isEvacuated() ? std::nullopt : state.molar().vapourFraction;
+}
+
 void addState(FigureList &list, const path::StateResult &state, int number, const units::DisplayUnits &units)
 {
+    list.add("vapour_fraction", say("state %1: vapour fraction <i>x</i>").arg(number), vapourFraction(state.state),
+             Quantity::number);
     list.add("available_work", say("state %1: available work").arg(number), state.availableWork, Quantity::energy);
     if (!state.storedEnergy) return;
     list.add("stored_energy", say("state %1: stored energy").arg(number), state.storedEnergy->real, Quantity::energy);
@@ -206,10 +245,8 @@ std::vector<LedgerRow> segmentFigureRows(const Snapshot &snapshot, int segment, 
     list.addText(QStringLiteral("<i>V</i>"), rangeText(result.extrema.volume, Quantity::volume, snapshot.units));
     list.addText(QStringLiteral("<i>T</i>"),
                  rangeText(result.extrema.temperature, Quantity::temperature, snapshot.units));
-    if (result.idealGas && !result.from.gas().isIdeal()) {
-        list.add("ideal_gas_work", say("as an ideal gas: <i>W</i>"), sign * result.idealGas->work, Quantity::energy);
-        list.add("ideal_gas_heat", say("as an ideal gas: <i>Q</i>"), sign * result.idealGas->heat, Quantity::energy);
-    }
+    addCrossings(list, result, snapshot.units);
+    addIdealGas(list, result, snapshot.units);
     const auto end = static_cast<std::size_t>(segment) + 1;
     if (end < path.states.size()) addState(list, path.states[end], segment + 2, snapshot.units);
     append(rows, list.take());

@@ -92,6 +92,9 @@ constexpr std::array figureTable{
                   formatDefinition},
     FigureFormula{"ideal_gas_heat", "<i>Q</i> from the same start with the ideal part of the equation",
                   formatDefinition},
+    FigureFormula{"ideal_gas_end_temperature", "<i>T</i> at the end as written, with the ideal part of the equation",
+                  formatDefinition},
+    FigureFormula{"vapour_fraction", "<i>x</i> = moles of vapour / moles, by the lever rule", formatDefinition},
     FigureFormula{"available_work",
                   "(<i>U</i>−<i>U</i><sub>0</sub>) + <i>p</i><sub>0</sub>(<i>V</i>−<i>V</i><sub>0</sub>) − "
                   "<i>T</i><sub>0</sub>(<i>S</i>−<i>S</i><sub>0</sub>)",

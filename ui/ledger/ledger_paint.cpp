@@ -65,9 +65,10 @@ void LedgerView::paintRow(QPainter &painter, const LedgerRow &row, const QRectF 
 {
     switch (row.kind) {
     case LedgerRowKind::heading: paintHeading(painter, row, place); return;
-    case LedgerRowKind::columns: paintColumns(painter, place); return;
+    case LedgerRowKind::columns: paintColumns(painter, row, place); return;
     case LedgerRowKind::segment:
     case LedgerRowKind::total: paintAccountRow(painter, row, place); return;
+    case LedgerRowKind::spread: paintSpreadRow(painter, row, place); return;
     case LedgerRowKind::formula:
     case LedgerRowKind::route:
     case LedgerRowKind::source: paintOpenedRow(painter, row, place); return;
@@ -88,15 +89,13 @@ void LedgerView::paintHeading(QPainter &painter, const LedgerRow &row, const QRe
     drawText(painter, {width() - margin, place.top() + 28}, row.unit, labelFace(), Align::right);
 }
 
-void LedgerView::paintColumns(QPainter &painter, const QRectF &place)
+void LedgerView::paintColumns(QPainter &painter, const LedgerRow &row, const QRectF &place)
 {
     painter.setPen(m_look.secondary());
-    drawText(painter, {margin, place.top() + 14}, tr("segment"), labelFace());
+    drawText(painter, {margin, place.top() + 14}, row.label, labelFace());
     painter.setPen(faded(m_look.ink, 0.85));
-    static const QString heads[] = {QStringLiteral("<i>W</i>"), QStringLiteral("<i>Q</i>"),
-                                    QStringLiteral("Δ<i>U</i>")};
-    for (int column = 0; column < 3; ++column)
-        drawText(painter, {columnRight(column), place.top() + 14}, RichText::marked(heads[column]), bodyFace(),
+    for (int column = 0; column < row.figures.size(); ++column)
+        drawText(painter, {columnRight(column), place.top() + 14}, RichText::marked(row.figures[column]), bodyFace(),
                  Align::right);
     drawRule(painter, place.bottom() - 0.5, margin, width() - margin, faded(m_look.ink, 0.25));
 }
@@ -111,14 +110,16 @@ void LedgerView::paintAccountRow(QPainter &painter, const LedgerRow &row, const 
         painter.fillRect(QRectF(0, place.top(), 3, place.height()), m_look.accent);
     } else if (hovered)
         painter.fillRect(place, faded(m_look.ink, 0.04));
-    const double y = place.top() + (total ? 21 : 20);
+    const bool isAbove = !total && isTitleAbove(row);
+    const double titleY = place.top() + (total ? 21 : isAbove ? 18 : 20);
+    const double y = isAbove ? place.top() + 36 : titleY;
     const QFont name = face(13, total || selected ? QFont::DemiBold : QFont::Normal);
     painter.setPen(m_look.secondary());
-    drawText(painter, {margin, y}, row.lead, labelFace());
-    const double left = total ? margin : margin + 7 + std::max(7.0, textWidth(row.lead, labelFace()));
+    drawText(painter, {margin, titleY}, row.lead, labelFace());
+    const double left = titleLeft(row);
     painter.setPen(m_look.ink);
-    const double firstFigure = columnRight(0) - textWidth(row.figures.value(0), bodyFace());
-    drawFitted(painter, {left, y}, row.label, name, firstFigure - 4 - left);
+    const double right = isAbove ? width() - margin : columnRight(0) - textWidth(row.figures.value(0), bodyFace()) - 4;
+    drawFitted(painter, {left, titleY}, row.label, name, right - left);
     const QFont figures = face(13, total ? QFont::DemiBold : QFont::Normal);
     for (int column = 0; column < row.figures.size(); ++column) {
         const bool struck = row.struck && column == 1;
@@ -134,6 +135,24 @@ void LedgerView::paintAccountRow(QPainter &painter, const LedgerRow &row, const 
         drawRule(painter, place.top() + 0.5, margin, width() - margin, faded(m_look.ink, 0.7), 1.25);
     else
         drawRule(painter, place.bottom() - 0.5, margin, width() - margin, faded(m_look.ink, 0.1));
+}
+
+void LedgerView::paintSpreadRow(QPainter &painter, const LedgerRow &row, const QRectF &place)
+{
+    painter.setPen(m_look.secondary());
+    drawText(painter, {margin, place.top() + 18}, row.lead, labelFace());
+    const double left = titleLeft(row);
+    painter.setPen(m_look.ink);
+    drawFitted(painter, {left, place.top() + 18}, row.label, bodyFace(), width() - margin - left);
+    for (int column = 0; column < row.figures.size(); ++column) {
+        painter.setPen(m_look.ink);
+        drawText(painter, {columnRight(column), place.top() + 36}, row.figures[column], bodyFace(), Align::right);
+        painter.setPen(m_look.secondary());
+        drawText(painter, {columnRight(column), place.top() + 53}, row.remarks.value(column), labelFace(),
+                 Align::right);
+    }
+    if (!row.remarks.isEmpty()) drawText(painter, {left, place.top() + 53}, tr("off by"), labelFace());
+    drawRule(painter, place.bottom() - 0.5, margin, width() - margin, faded(m_look.ink, 0.1));
 }
 
 void LedgerView::paintOpenedRow(QPainter &painter, const LedgerRow &row, const QRectF &place)
@@ -204,7 +223,7 @@ void LedgerView::paintTextRow(QPainter &painter, const LedgerRow &row, const QRe
     double left = margin;
     if (warning || !row.lead.isEmpty()) left += 22;
     if (warning) drawMark(painter, StateMark::warning, {margin + 6, place.top() + 11}, m_look.warning, m_look.panel);
-    painter.setPen(fault ? m_look.error : faded(m_look.ink, warning || !row.lead.isEmpty() ? 0.85 : 0.66));
+    painter.setPen(fault ? m_look.error : faded(m_look.ink, row.strong ? 1.0 : warning || !row.lead.isEmpty() ? 0.85 : 0.66));
     const QString text = row.label.unstyled();
     const double wide = width() - margin - left;
     if (textWidth(row.label, labelFace()) <= wide)

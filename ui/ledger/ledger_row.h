@@ -13,9 +13,10 @@ namespace quasistat::ui
 
 enum class LedgerRowKind {
     heading,  ///< "Ledger" with the unit and the sign
-    columns,  ///< segment, W, Q, ΔU
+    columns,  ///< what the rows below name, and the heads of their figures
     segment,  ///< number, name, three figures, audit mark
     total,    ///< the same for the path
+    spread,   ///< number, name, three figures of the ideal gas over how far they are off
     formula,  ///< of an opened figure
     route,    ///< a figure found one way, with its unit
     source,   ///< where the formula is published
@@ -33,6 +34,7 @@ struct LedgerRow {
     QString lead{}; ///< the segment's number
     RichText label{};
     QStringList figures{};
+    QStringList remarks{}; ///< one below each figure
     QString unit{};
     std::optional<StateMark> mark{};
     int segment = -1;    ///< from 0; of the rows that belong to one
@@ -41,6 +43,7 @@ struct LedgerRow {
     bool isOpen = false; ///< and shows it
     bool opened = false; ///< belongs to an opened figure: on its ground
     bool warned = false; ///< in the warning colour
+    bool strong = false; ///< a sentence in full ink: it stands until the next edit
 
     [[nodiscard]] QString spoken() const; ///< the row in words
 };

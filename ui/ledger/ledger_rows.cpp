@@ -1,5 +1,6 @@
 #include "ui/ledger/ledger_rows.h"
 
+#include "ui/gas/model_spread.h"
 #include "ui/ledger/verdict_words.h"
 #include "ui/session/design_reading.h"
 #include "ui/session/sentences.h"
@@ -93,7 +94,8 @@ std::vector<LedgerRow> warningRows(const Snapshot &snapshot)
     return rows;
 }
 
-std::vector<LedgerRow> ledgerRows(const Snapshot &snapshot, int selected, const LedgerOpen &open)
+std::vector<LedgerRow> ledgerRows(const Snapshot &snapshot, int selected, const LedgerOpen &open,
+                                  const Snapshot *before)
 {
     if (!snapshot.evaluation) {
         LedgerRow heading = textRow(LedgerRowKind::heading, say("Ledger"));
@@ -112,7 +114,15 @@ std::vector<LedgerRow> ledgerRows(const Snapshot &snapshot, int selected, const 
     }
     if (path.failures.empty())
         rows.push_back(textRow(LedgerRowKind::sentence, say("The path has no segments yet: place the first one.")));
+    if (before) {
+        LedgerRow change{.kind = LedgerRowKind::sentence};
+        change.id = QStringLiteral("modelChange");
+        change.label = modelChangeWords(*before, snapshot);
+        change.strong = true;
+        rows.push_back(change);
+    }
     append(rows, segmentFigureRows(snapshot, selected, open));
+    append(rows, spreadRows(snapshot, open));
     append(rows, pathFigureRows(snapshot, open));
     append(rows, envelopeRows(snapshot));
     append(rows, warningRows(snapshot));

@@ -49,7 +49,7 @@ void LedgerView::setLook(const Palette &look)
 
 void LedgerView::refresh()
 {
-    m_rows = ledgerRows(m_session.now(), m_session.selected(), m_open);
+    m_rows = ledgerRows(m_session.now(), m_session.selected(), m_open, m_session.beforeModelChange());
     if (m_cursor >= static_cast<int>(m_rows.size())) m_cursor = -1;
     m_hovered = -1;
     setAccessibleDescription(spoken());
@@ -73,7 +73,8 @@ int LedgerView::heightOf(const LedgerRow &row) const
     switch (row.kind) {
     case LedgerRowKind::heading: return 40;
     case LedgerRowKind::columns: return 22;
-    case LedgerRowKind::segment: return 30;
+    case LedgerRowKind::segment: return isTitleAbove(row) ? 46 : 30;
+    case LedgerRowKind::spread: return 64;
     case LedgerRowKind::total: return 32;
     case LedgerRowKind::formula: return 30;
     case LedgerRowKind::route: return row.opened ? 18 : 24;
@@ -96,6 +97,8 @@ void LedgerView::layOut()
         if (isAccount(row)) account += row.figures;
         if (row.kind == LedgerRowKind::figure) fractions += row.figures;
     }
+    for (const LedgerRow &row : m_rows)
+        if (row.kind == LedgerRowKind::spread) account += row.figures + row.remarks;
     m_columnWidth = std::min(67.0, (width() - 139.0) / 3.0);
     for (const QString &figure : account)
         m_columnWidth = std::max(m_columnWidth, textWidth(figure, face(13, QFont::DemiBold)) + 8.0);
@@ -109,6 +112,18 @@ void LedgerView::layOut()
         y += high;
     }
     setFixedHeight(std::max(y + 12, 40));
+}
+
+double LedgerView::titleLeft(const LedgerRow &row) const
+{
+    return row.kind == LedgerRowKind::total ? margin : margin + 7 + std::max(7.0, textWidth(row.lead, labelFace()));
+}
+
+bool LedgerView::isTitleAbove(const LedgerRow &row) const
+{
+    const double firstFigure = columnRight(0) - textWidth(row.figures.value(0), bodyFace());
+    // As wide as it gets when the row is selected, so that selecting moves nothing.
+    return textWidth(row.label, face(13, QFont::DemiBold)) > firstFigure - 4 - titleLeft(row);
 }
 
 QSize LedgerView::sizeHint() const
@@ -172,6 +187,8 @@ void LedgerView::activate(int row, int column)
         toggleFigure(what.id);
     } else if (what.id == QLatin1String("segment")) {
         m_open.segmentFigures = !m_open.segmentFigures;
+    } else if (what.id == QLatin1String("spread")) {
+        m_open.spread = !m_open.spread;
     } else if (what.id == QLatin1String("envelope")) {
         emit envelopeRequested();
     } else if (what.segment >= 0) {

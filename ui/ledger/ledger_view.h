@@ -45,6 +45,9 @@ private:
     [[nodiscard]] int rowAt(const QPoint &point) const;
     [[nodiscard]] int columnAt(int x) const;
     [[nodiscard]] double columnRight(int column) const;
+    /// The name and the first figure of an account row do not fit beside each other.
+    [[nodiscard]] bool isTitleAbove(const LedgerRow &row) const;
+    [[nodiscard]] double titleLeft(const LedgerRow &row) const;
     void toggleFigure(const QString &id);
     void activate(int row, int column);
     void moveCursor(int by);
@@ -55,7 +58,8 @@ private:
     void paintFigureRow(QPainter &painter, const LedgerRow &row, const QRectF &place);
     void paintTextRow(QPainter &painter, const LedgerRow &row, const QRectF &place);
     void paintLimitRow(QPainter &painter, const LedgerRow &row, const QRectF &place);
-    void paintColumns(QPainter &painter, const QRectF &place);
+    void paintColumns(QPainter &painter, const LedgerRow &row, const QRectF &place);
+    void paintSpreadRow(QPainter &painter, const LedgerRow &row, const QRectF &place);
     void paintHeading(QPainter &painter, const LedgerRow &row, const QRectF &place);
     void paintSection(QPainter &painter, const LedgerRow &row, const QRectF &place);
 

@@ -23,11 +23,6 @@ QString say(const char *text)
     return QCoreApplication::translate("Report", text);
 }
 
-QString text(std::string_view words)
-{
-    return QString::fromUtf8(words.data(), static_cast<qsizetype>(words.size()));
-}
-
 std::vector<Block> section(const QString &title, const std::vector<RichText> &paragraphs, double width)
 {
     if (paragraphs.empty()) return {};
@@ -63,13 +58,6 @@ void addMeanings(std::vector<RichText> &list, const path::PathResult &path)
     if (uses(path, Kind::freeExpansion))
         list.push_back(RichText::marked(
             say("Free expansion: <i>W</i> = 0; the drawn curve is a guide for the eye, its area is no work.")));
-}
-
-QString kelvinRange(const gas::Range &range, const units::DisplayUnits &units)
-{
-    return say("%1 to %2")
-        .arg(shownFigure(range.lowestTemperature, units::Quantity::temperature, units),
-             shownFigure(range.highestTemperature, units::Quantity::temperature, units));
 }
 
 } // namespace
@@ -145,27 +133,6 @@ std::vector<Block> assumptionsSection(const ReportContent &content)
         say("Energies and entropies are zero for each component as ideal gas at 298.15 K and 100 kPa.")));
     list.push_back(RichText::plain(say("Stored energy is an isentropic release to the pressure of the surroundings.")));
     return section(say("Assumptions"), list, content.width);
-}
-
-std::vector<Block> modelSection(const ReportContent &content)
-{
-    const gas::Gas &gas = *content.evaluation.path.gas;
-    const units::DisplayUnits &units = content.snapshot.units;
-    std::vector<RichText> list;
-    list.push_back(
-        RichText::plain(say("Model: %1. Molar mass %2, gas constant %3 J/(mol K).")
-                            .arg(text(gas.model()), shownFigure(gas.molarMass(), units::Quantity::molarMass, units),
-                                 QString::number(gas.gasConstant(), 'f', 6))));
-    QStringList shares;
-    for (const gas::Share &share : gas.composition())
-        shares << QStringLiteral("%1 %2").arg(QString::fromStdString(share.component),
-                                              QString::number(share.moleFraction, 'g', 6));
-    if (!shares.isEmpty())
-        list.push_back(RichText::plain(say("Composition, mole fractions: %1.").arg(shares.join(QStringLiteral(", ")))));
-    if (std::isfinite(gas.validity().valid.highestTemperature))
-        list.push_back(RichText::plain(say("Published range: %1.").arg(kelvinRange(gas.validity().valid, units))));
-    list.push_back(RichText::plain(say("Source: %1.").arg(text(gas.source()))));
-    return section(say("Model and sources"), list, content.width);
 }
 
 std::vector<Block> cautionSection(const ReportContent &content)

@@ -1,6 +1,7 @@
 // States and ledger: the figures of the path in columns.
 
 #include "ui/ledger/ledger_rows.h"
+#include "ui/report/figure_columns.h"
 #include "ui/report/prose.h"
 #include "ui/report/sections.h"
 #include "ui/report/table.h"
@@ -32,58 +33,6 @@ RichText marked(const QString &markup)
     return RichText::marked(markup);
 }
 
-/// One column of figures: its head and scale, and the value of each row.
-struct FigureColumn {
-    QString symbol; ///< marked text
-    Quantity quantity;
-    std::vector<std::optional<double>> values;
-    std::optional<units::Scale> scale{}; ///< chosen from the values where none is given
-
-    [[nodiscard]] units::Scale scaleIn(const units::DisplayUnits &units) const
-    {
-        if (scale) return *scale;
-        std::vector<double> known;
-        for (const auto &value : values)
-            if (value) known.push_back(*value);
-        return units::scaleFor(quantity, known, units);
-    }
-};
-
-RichText headOf(const FigureColumn &column, const units::Scale &scale)
-{
-    const QString unit = QString::fromStdString(scale.unit);
-    return marked(unit.isEmpty() ? column.symbol : QStringLiteral("%1\u00a0/\u00a0%2").arg(column.symbol, unit));
-}
-
-RichText cellOf(const std::optional<double> &value, const units::Scale &scale)
-{
-    return RichText::plain(value ? figure(*value, scale) : QStringLiteral("–"));
-}
-
-/// Adds the figure columns to `columns` and a cell each to `rows`.
-void addFigures(std::vector<TableColumn> &columns, std::vector<TableRow> &rows,
-                const std::vector<FigureColumn> &figures, double share, const units::DisplayUnits &units)
-{
-    for (const FigureColumn &column : figures) {
-        const units::Scale scale = column.scaleIn(units);
-        columns.push_back({headOf(column, scale), share, Align::right});
-        for (std::size_t r = 0; r < rows.size(); ++r) rows[r].cells.push_back({cellOf(column.values[r], scale), {}});
-    }
-}
-
-template <class Items, class Value>
-std::vector<std::optional<double>> valuesOf(const Items &items, Value value)
-{
-    std::vector<std::optional<double>> values;
-    for (const auto &item : items) values.push_back(value(item));
-    return values;
-}
-
-RichText numbered(std::size_t number, const RichText &words)
-{
-    return RichText::plain(QStringLiteral("%1  ").arg(number)) + words;
-}
-
 RichText titleAndKind(const document::Json &segment, const SegmentResult &result)
 {
     const QString title = segmentTitle(segment);
@@ -98,6 +47,18 @@ bool isViolatedOn(const analysis::Evaluation &evaluation, int segment)
         return std::any_of(verdict.violations.begin(), verdict.violations.end(),
                            [&](const analysis::Violation &violation) { return violation.segment == segment; });
     });
+}
+
+/// A column only where a state has one.
+void addVapourFractions(std::vector<TableColumn> &columns, std::vector<TableRow> &rows,
+                        const std::vector<StateResult> &states, const units::DisplayUnits &units)
+{
+    const auto fractions = valuesOf(states, [](const StateResult &s) {
+        return s.state.isEvacuated() ? std::nullopt : s.state.molar().vapourFraction;
+    });
+    if (std::none_of(fractions.begin(), fractions.end(), [](const auto &x) { return x.has_value(); })) return;
+    const units::Scale share{.unit = {}, .factor = 1.0, .offset = 0.0, .decimals = 4};
+    addFigures(columns, rows, {{say("vapour <i>x</i>"), Quantity::number, fractions, share}}, 0.9, units);
 }
 
 StateMark auditMark(bool ok)
@@ -137,6 +98,7 @@ std::vector<Block> statesSection(const ReportContent &content)
          })}};
     addFigures(columns, rows, figures, 1.0, content.snapshot.units);
     columns.back().share = 1.35; // its head is long
+    addVapourFractions(columns, rows, states, content.snapshot.units);
     std::vector<Block> blocks{heading(say("States"), content.width)};
     for (Block &block : table(columns, rows, content.width)) blocks.push_back(std::move(block));
     blocks.push_back(space(10.0));

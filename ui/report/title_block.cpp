@@ -1,5 +1,6 @@
 // The title block and the line of what everything rests on.
 
+#include "ui/gas/gas_words.h"
 #include "ui/canvas/limit_text.h"
 #include "ui/report/print_type.h"
 #include "ui/report/sections.h"
@@ -146,9 +147,9 @@ std::vector<Block> basis(const ReportContent &content)
     const auto &[snapshot, evaluation, order, width] = content;
     const gas::Gas &gas = *evaluation.path.gas;
     const QString name = QString::fromStdString(gas.name());
-    const QString model = QString::fromUtf8(gas.model().data(), static_cast<qsizetype>(gas.model().size()));
+    const QString model = modelName(gas.model());
     const QString gamma = typedAt(snapshot.design.json, "/gas/heat_capacity_ratio");
-    QString gasWords = name.isEmpty() ? say("%1 gas").arg(model) : say("%1, %2 gas").arg(name, model);
+    QString gasWords = name.isEmpty() ? model : QStringLiteral("%1, %2").arg(name, model);
     if (!gamma.isEmpty()) gasWords += QStringLiteral(", γ = %1").arg(gamma);
     const std::vector<std::pair<double, Field>> fields{
         {0.30, {say("gas and model"), gasWords}},

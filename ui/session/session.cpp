@@ -7,6 +7,19 @@
 namespace quasistat::ui
 {
 
+namespace
+{
+
+/// The same path in another model of its gas.
+bool differsInModelAlone(const document::Design &before, const document::Design &after)
+{
+    const document::Json *gas = valueAt(after.json, "/gas");
+    if (!gas || typedAt(before.json, "/gas/model") == typedAt(after.json, "/gas/model")) return false;
+    return withValue(before, "/gas", *gas) == after;
+}
+
+} // namespace
+
 Session::Session(QObject *parent) : QObject(parent), m_snapshot(std::make_shared<const Snapshot>())
 {
     connect(&m_undo, &QUndoStack::cleanChanged, this, &Session::fileChanged);
@@ -31,6 +44,7 @@ void Session::close()
 void Session::replace(document::Design design, const QString &path, bool hasDesign)
 {
     m_beforePreview.reset();
+    m_beforeModelChange.reset();
     m_hasDesign = hasDesign;
     m_path = path;
     m_snapshot = hasDesign ? snapshotOf(std::move(design)) : std::make_shared<const Snapshot>();
@@ -121,8 +135,10 @@ void Session::hover(int segment)
 
 void Session::show(document::Design design)
 {
+    const SnapshotPtr before = m_beforePreview ? m_beforePreview : m_snapshot;
     m_beforePreview.reset();
     m_snapshot = snapshotOf(std::move(design));
+    m_beforeModelChange = differsInModelAlone(before->design, m_snapshot->design) ? before : nullptr;
     clampSelection();
     emit snapshotChanged();
 }

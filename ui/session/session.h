@@ -60,6 +60,11 @@ public:
     [[nodiscard]] bool isPreviewing() const { return m_beforePreview != nullptr; }
     /// The design an edit starts from: the one before the preview, or now.
     [[nodiscard]] const Snapshot &base() const { return m_beforePreview ? *m_beforePreview : *m_snapshot; }
+    /// What was shown before the last step, if that step changed the gas alone and gave it another model; else null.
+    [[nodiscard]] const Snapshot *beforeModelChange() const
+    {
+        return isPreviewing() ? nullptr : m_beforeModelChange.get();
+    }
     /// Why `design` as a whole, or its start, cannot be computed; none if it can.
     [[nodiscard]] std::optional<Failure> faultIn(const document::Design &design) const;
     void undo(); ///< ends a preview first
@@ -89,6 +94,7 @@ private:
     QUndoStack m_undo;
     SnapshotPtr m_snapshot;
     SnapshotPtr m_beforePreview;
+    SnapshotPtr m_beforeModelChange;
     QString m_path;
     bool m_hasDesign = false;
     int m_selected = -1;

@@ -1,17 +1,16 @@
 #include "ui/window/header_forms.h"
 
+#include "ui/gas/gas_words.h"
 #include "ui/session/design_reading.h"
 #include "ui/session/sentences.h"
 #include "ui/strip/segment_form.h"
 
 #include <QCoreApplication>
-#include <QRegularExpression>
 
 namespace quasistat::ui
 {
 
 using document::Design;
-using document::Json;
 using units::Quantity;
 
 namespace
@@ -61,73 +60,6 @@ std::vector<FormField> titleForm(const Design &design)
     add("approved_by", QT_TRANSLATE_NOOP("Header", "approved"), "/document/approved_by");
     add("notes", QT_TRANSLATE_NOOP("Header", "notes"), "/notes");
     return form;
-}
-
-// --- gas
-
-std::string compositionKey(const Design &design)
-{
-    return valueAt(design.json, "/gas/composition_by_mass") ? "composition_by_mass" : "composition";
-}
-
-QString modelWords(const Design &design)
-{
-    const QString model = typedAt(design.json, "/gas/model");
-    return model == QLatin1String("perfect") ? say("perfect") : model == QLatin1String("ideal") ? say("ideal") : model;
-}
-
-RichText gasWords(const Snapshot &snapshot)
-{
-    const Design &design = snapshot.design;
-    QString name = typedAt(design.json, "/gas/name");
-    if (name.isEmpty()) {
-        const Json *composition = valueAt(design.json, "/gas/" + compositionKey(design));
-        if (composition) name = compositionText(*composition);
-    }
-    const QString ratio = typedAt(design.json, "/gas/heat_capacity_ratio");
-    RichText words = RichText::plain(name.isEmpty() ? modelWords(design) : name + dot + modelWords(design));
-    if (!ratio.isEmpty()) words += RichText::marked(QStringLiteral(", <i>γ</i> ")) + RichText::plain(asPrinted(ratio));
-    return words;
-}
-
-std::vector<FormField> gasForm(const Design &design)
-{
-    FormField model{.id = "model", .caption = say(QT_TRANSLATE_NOOP("Header", "model"))};
-    model.choices = {{"perfect", say(QT_TRANSLATE_NOOP("Header", "perfect, constant heat capacity"))},
-                     {"ideal", say(QT_TRANSLATE_NOOP("Header", "ideal, published heat capacities"))}};
-    model.chosen = typedAt(design.json, "/gas/model").toStdString();
-    std::vector<FormField> form{model};
-    if (model.chosen == "perfect") {
-        form.push_back(
-            valueField("heat_capacity_ratio", "γ", FieldContent::number, "/gas/heat_capacity_ratio", design));
-        form.push_back(valueField("molar_mass", QT_TRANSLATE_NOOP("Header", "molar mass"), FieldContent::quantity,
-                                  "/gas/molar_mass", design, Quantity::molarMass));
-        form.push_back(
-            valueField("name", QT_TRANSLATE_NOOP("Header", "called"), FieldContent::text, "/gas/name", design));
-        return form;
-    }
-    const std::string key = compositionKey(design);
-    FormField made = valueField("composition",
-                                key == "composition" ? QT_TRANSLATE_NOOP("Header", "made of")
-                                                     : QT_TRANSLATE_NOOP("Header", "by mass"),
-                                FieldContent::text, "", design);
-    made.pointer = "/gas/" + key;
-    if (const Json *composition = valueAt(design.json, made.pointer)) made.value = compositionText(*composition);
-    made.placeholder = say(QT_TRANSLATE_NOOP("Header", "air, or nitrogen 0.78, oxygen 0.22"));
-    form.push_back(made);
-    return form;
-}
-
-Design modelChosen(const Design &design, const std::string &model)
-{
-    Json gas{{"model", model}};
-    if (model == "perfect") {
-        gas["heat_capacity_ratio"] = 1.4;
-        gas["molar_mass"] = "28.96 g/mol";
-        gas["name"] = say(QT_TRANSLATE_NOOP("Header", "Dry air")).toStdString();
-    } else
-        gas["composition"] = Json{{"air", 1}};
-    return withValue(design, "/gas", gas);
 }
 
 // --- surroundings, units, rate
@@ -200,7 +132,7 @@ HeaderText headerText(HeaderPart part, const Snapshot &snapshot)
         const QString title = typedAt(snapshot.design.json, "/title");
         return {numberAndRevision(snapshot.design), RichText::plain(title.isEmpty() ? say("untitled design") : title)};
     }
-    case HeaderPart::gas: return {say("gas"), gasWords(snapshot)};
+    case HeaderPart::gas: return {say("gas"), gasWords(snapshot.design)};
     case HeaderPart::surroundings: return {say("surroundings"), surroundingsWords(snapshot)};
     case HeaderPart::sign:
         return {say("work and heat"),
@@ -218,7 +150,7 @@ std::vector<FormField> headerForm(HeaderPart part, const Snapshot &snapshot)
 {
     switch (part) {
     case HeaderPart::title: return titleForm(snapshot.design);
-    case HeaderPart::gas: return gasForm(snapshot.design);
+    case HeaderPart::gas: return {}; // its editor is one of its own
     case HeaderPart::surroundings: return surroundingsForm(snapshot);
     case HeaderPart::sign: return {};
     case HeaderPart::units: return unitsForm(snapshot.units);
@@ -233,22 +165,14 @@ std::vector<FormField> headerForm(HeaderPart part, const Snapshot &snapshot)
     return {};
 }
 
-HeaderEdit headerEntered(HeaderPart part, const Design &design, const FormField &field, const QString &text)
+Design headerEntered(const Design &design, const FormField &field, const QString &text)
 {
-    if (part == HeaderPart::gas && field.id == "composition") {
-        const auto composition = compositionFrom(text);
-        if (!composition)
-            return {design,
-                    say("Write each gas with its fraction: nitrogen 0.78, oxygen 0.22; or one name alone: air.")};
-        return {withValue(design, field.pointer, *composition), {}};
-    }
-    if (field.content == FieldContent::number) return {withValue(design, field.pointer, numberAsTyped(text)), {}};
-    return {withText(design, field.pointer, text), {}};
+    return field.content == FieldContent::number ? withValue(design, field.pointer, numberAsTyped(text))
+                                                 : withText(design, field.pointer, text);
 }
 
-Design headerChosen(HeaderPart part, const Snapshot &snapshot, const FormField &field, const std::string &key)
+Design headerChosen(const Snapshot &snapshot, const FormField &field, const std::string &key)
 {
-    if (part == HeaderPart::gas) return modelChosen(snapshot.design, key);
     return withValue(snapshot.design, "/view/units/" + field.id, key);
 }
 
@@ -256,40 +180,6 @@ Design signTurned(const Snapshot &snapshot)
 {
     return snapshot.units.workByGas ? withoutValue(snapshot.design, "/view/sign")
                                     : withValue(snapshot.design, "/view/sign", "by the gas");
-}
-
-QString compositionText(const Json &composition)
-{
-    if (!composition.is_object()) return {};
-    QStringList parts;
-    for (const auto &[name, share] : composition.items()) {
-        const QString component = QString::fromStdString(name);
-        const bool alone = composition.size() == 1 && share == 1;
-        parts << (alone ? component : component + QLatin1Char(' ') + typed(&share));
-    }
-    return parts.join(QStringLiteral(", "));
-}
-
-std::optional<Json> compositionFrom(const QString &text)
-{
-    static const QRegularExpression entry(QStringLiteral("^(.*\\S)\\s+([0-9.eE+-]+)$"));
-    const QStringList parts = text.split(QLatin1Char(','));
-    Json composition = Json::object();
-    for (const QString &part : parts) {
-        const QString trimmed = part.trimmed();
-        const auto match = entry.match(trimmed);
-        if (trimmed.isEmpty() || (!match.hasMatch() && parts.size() > 1)) return {};
-        if (!match.hasMatch()) {
-            composition[trimmed.toStdString()] = 1;
-            continue;
-        }
-        bool isNumber = false;
-        const double share = match.captured(2).toDouble(&isNumber);
-        if (!isNumber) return {};
-        const Json asTyped = numberAsTyped(match.captured(2));
-        composition[match.captured(1).toStdString()] = asTyped.is_number() ? asTyped : Json(share);
-    }
-    return composition;
 }
 
 } // namespace quasistat::ui

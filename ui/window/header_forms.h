@@ -17,23 +17,15 @@ struct HeaderText {
 };
 [[nodiscard]] HeaderText headerText(HeaderPart part, const Snapshot &snapshot);
 
-/// The fields of the part's editor.
+/// The fields of the part's editor; none for sign, which turns by a click, and gas, which has an editor of its own.
 [[nodiscard]] std::vector<FormField> headerForm(HeaderPart part, const Snapshot &snapshot);
 
-/// A changed design, or why the text does not do.
-struct HeaderEdit {
-    document::Design design;
-    QString complaint;
-};
-[[nodiscard]] HeaderEdit headerEntered(HeaderPart part, const document::Design &design, const FormField &field,
+/// The design after `text` was entered in `field`.
+[[nodiscard]] document::Design headerEntered(const document::Design &design, const FormField &field,
                                        const QString &text);
-[[nodiscard]] document::Design headerChosen(HeaderPart part, const Snapshot &snapshot, const FormField &field,
+[[nodiscard]] document::Design headerChosen(const Snapshot &snapshot, const FormField &field,
                                             const std::string &key);
 /// Turns the display of work and heat to "by the gas" and back.
 [[nodiscard]] document::Design signTurned(const Snapshot &snapshot);
-
-/// "nitrogen 0.78, oxygen 0.22", as the composition of a document is written in one line; and back.
-[[nodiscard]] QString compositionText(const document::Json &composition);
-[[nodiscard]] std::optional<document::Json> compositionFrom(const QString &text);
 
 } // namespace quasistat::ui

@@ -13,11 +13,16 @@ namespace quasistat::ui
 namespace
 {
 
-constexpr int popoverWidth = 348;
+constexpr int formWidth = 348;
+constexpr int gasWidth = 420;
+constexpr int edgeX = 14;
+constexpr int edgeY = 12;
 
-/// Also true for the opened list of a choice, which is a window of its own.
+/// Also true for the opened list of a choice, which is a window of its own, and of a text field, which has no parent
+/// but hands its keys on.
 bool belongsTo(const QWidget *widget, const QWidget *ancestor)
 {
+    if (const QWidget *field = widget->window()->focusProxy()) return belongsTo(field, ancestor);
     for (; widget; widget = widget->parentWidget())
         if (widget == ancestor) return true;
     return false;
@@ -26,25 +31,41 @@ bool belongsTo(const QWidget *widget, const QWidget *ancestor)
 } // namespace
 
 HeaderPopover::HeaderPopover(Session &session, QWidget *parent)
-    : QWidget(parent), m_session(session), m_look(ui::palette(Scheme::light)), m_form(new FormView(this))
+    : QWidget(parent), m_session(session), m_look(ui::palette(Scheme::light)), m_form(new FormView(this)),
+      m_gasArea(new QScrollArea(this)), m_gas(new GasEditor(session))
 {
     auto *column = new QVBoxLayout(this);
-    column->setContentsMargins(14, 12, 14, 12);
+    column->setContentsMargins(edgeX, edgeY, edgeX, edgeY);
+    column->setSpacing(0);
     column->addWidget(m_form);
+    column->addWidget(m_gasArea);
+    m_gasArea->setWidget(m_gas);
+    m_gasArea->setWidgetResizable(true);
+    m_gasArea->setFrameShape(QFrame::NoFrame);
+    m_gasArea->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
     m_form->setRejectsInvalid(true);
+    m_gas->installEventFilter(this); // its height may change at any time
     hide();
     connect(&session, &Session::snapshotChanged, this, &HeaderPopover::refresh);
-    connect(m_form, &FormView::chosen, this, &HeaderPopover::choose);
-    connect(m_form, &FormView::typed, this, &HeaderPopover::type);
-    connect(m_form, &FormView::entered, this, &HeaderPopover::enter);
-    connect(m_form, &FormView::restored, &session, &Session::cancelPreview);
-    connect(m_form, &FormView::escaped, this, &QWidget::hide);
+    connectForm(*m_form);
+    connectForm(m_gas->form());
+    connect(m_gas, &GasEditor::escaped, this, &QWidget::hide);
+}
+
+void HeaderPopover::connectForm(FormView &form)
+{
+    connect(&form, &FormView::chosen, this, &HeaderPopover::choose);
+    connect(&form, &FormView::typed, this, &HeaderPopover::type);
+    connect(&form, &FormView::entered, this, &HeaderPopover::enter);
+    connect(&form, &FormView::restored, &m_session, &Session::cancelPreview);
+    connect(&form, &FormView::escaped, this, &QWidget::hide);
 }
 
 void HeaderPopover::setLook(const Palette &look)
 {
     m_look = look;
     m_form->setLook(look);
+    m_gas->setLook(look);
     update();
 }
 
@@ -52,21 +73,32 @@ void HeaderPopover::openFor(HeaderPart part, const QPoint &at)
 {
     finish();
     m_part = part;
-    m_form->setForm(headerForm(part, m_session.now()));
-    m_form->setSentences({});
-    resize(popoverWidth, 10);
-    move(std::min(at.x(), parentWidget()->width() - popoverWidth - 8), at.y());
+    const bool isGas = part == HeaderPart::gas;
+    m_form->setVisible(!isGas);
+    m_gasArea->setVisible(isGas);
+    if (isGas)
+        m_gas->refresh();
+    else
+        m_form->setForm(headerForm(part, m_session.now()));
+    form().setSentences({});
+    const int wide = isGas ? gasWidth : formWidth;
+    resize(wide, 10);
+    move(std::min(at.x(), parentWidget()->width() - wide - 8), at.y());
     show();
     raise();
     fit();
-    m_form->focusFirst();
+    if (isGas && m_gas->composition().isVisible())
+        m_gas->composition().nameField(0)->setFocus(Qt::OtherFocusReason);
+    else
+        form().focusFirst();
 }
 
 void HeaderPopover::finish()
 {
     if (!isVisible()) return;
-    m_form->finishTyping();
-    m_form->forgetTyping();
+    if (m_part == HeaderPart::gas) m_gas->finishTyping();
+    form().finishTyping();
+    form().forgetTyping();
     m_session.cancelPreview();
     hide();
 }
@@ -78,50 +110,59 @@ void HeaderPopover::refresh()
         hide();
         return;
     }
-    m_form->setForm(headerForm(m_part, m_session.now()));
+    if (m_part == HeaderPart::gas)
+        m_gas->refresh();
+    else
+        m_form->setForm(headerForm(m_part, m_session.now()));
     fit();
 }
 
 void HeaderPopover::fit()
 {
-    layout()->activate();
-    const int high =
-        layout()->hasHeightForWidth() ? layout()->heightForWidth(popoverWidth) : layout()->sizeHint().height();
-    resize(popoverWidth, high);
+    int high = 0;
+    if (m_part == HeaderPart::gas) {
+        QLayout &content = *m_gas->layout();
+        content.activate();
+        const int inner = gasWidth - 2 * edgeX;
+        high = 2 * edgeY + (content.hasHeightForWidth() ? content.heightForWidth(inner) : content.sizeHint().height());
+    } else {
+        layout()->activate();
+        high = layout()->hasHeightForWidth() ? layout()->heightForWidth(formWidth) : layout()->sizeHint().height();
+    }
+    resize(width(), std::min(high, parentWidget()->height() - y() - 16));
 }
 
 void HeaderPopover::choose(const QString &id, const QString &key)
 {
-    const FormField field = *m_form->field(id);
+    const FormField field = *form().field(id);
     if (field.chosen == key.toStdString()) return;
     m_session.cancelPreview();
-    m_session.apply(headerChosen(m_part, m_session.base(), field, key.toStdString()),
-                    tr("Change %1").arg(field.caption));
+    if (m_part == HeaderPart::gas)
+        m_gas->chooseModel(key.toStdString());
+    else
+        m_session.apply(headerChosen(m_session.base(), field, key.toStdString()), tr("Change %1").arg(field.caption));
 }
 
 void HeaderPopover::type(const QString &id, const QString &text)
 {
-    const HeaderEdit edit = headerEntered(m_part, m_session.base().design, *m_form->field(id), text);
+    const document::Design design = headerEntered(m_session.base().design, *form().field(id), text);
     // While the text does not do, the picture of the last one that did stays.
-    if (edit.complaint.isEmpty() && !m_session.faultIn(edit.design)) m_session.preview(edit.design);
+    if (!m_session.faultIn(design)) m_session.preview(design);
 }
 
 void HeaderPopover::enter(const QString &id, const QString &text)
 {
-    const FormField field = *m_form->field(id);
-    const HeaderEdit edit = headerEntered(m_part, m_session.base().design, field, text);
-    QString complaint = edit.complaint;
-    if (const auto fault = complaint.isEmpty() ? m_session.faultIn(edit.design) : std::nullopt)
-        complaint = sentenceOf(*fault, m_session.now().units);
+    const FormField field = *form().field(id);
+    const document::Design design = headerEntered(m_session.base().design, field, text);
+    const auto fault = m_session.faultIn(design);
     // A design that could not be computed before may be mended one field at a time.
-    const bool wasWhole = !m_session.faultIn(m_session.base().design);
-    if (!edit.complaint.isEmpty() || (!complaint.isEmpty() && wasWhole)) {
+    if (fault && !m_session.faultIn(m_session.base().design)) {
         m_session.cancelPreview();
-        m_form->refuse(id, complaint);
+        form().refuse(id, sentenceOf(*fault, m_session.now().units));
         fit();
         return;
     }
-    m_session.apply(edit.design, tr("Change %1").arg(field.caption));
+    m_session.apply(design, tr("Change %1").arg(field.caption));
 }
 
 void HeaderPopover::paintEvent(QPaintEvent *)
@@ -152,6 +193,10 @@ bool HeaderPopover::event(QEvent *event)
 
 bool HeaderPopover::eventFilter(QObject *watched, QEvent *event)
 {
+    if (watched == m_gas) {
+        if (event->type() == QEvent::LayoutRequest && isVisible()) fit();
+        return false;
+    }
     if (event->type() == QEvent::MouseButtonPress)
         if (const auto *widget = qobject_cast<QWidget *>(watched); widget && !belongsTo(widget, this)) finish();
     return false;

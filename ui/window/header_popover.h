@@ -2,7 +2,10 @@
 // The small editor that opens under a field of the header: not modal, closed by Esc or by a click elsewhere.
 
 #include "ui/fields/form_view.h"
+#include "ui/gas/gas_editor.h"
 #include "ui/window/header_forms.h"
+
+#include <QScrollArea>
 
 namespace quasistat::ui
 {
@@ -17,7 +20,9 @@ public:
     /// Opens for `part`, its upper left corner at `at` (the parent's coordinates) as far as the parent leaves room.
     void openFor(HeaderPart part, const QPoint &at);
     void finish(); ///< enters what is being typed and closes
-    [[nodiscard]] FormView &form() { return *m_form; }
+    /// The fields of the part that is open.
+    [[nodiscard]] FormView &form() { return m_part == HeaderPart::gas ? m_gas->form() : *m_form; }
+    [[nodiscard]] GasEditor &gas() { return *m_gas; }
     [[nodiscard]] HeaderPart part() const { return m_part; }
 
 protected:
@@ -29,6 +34,7 @@ protected:
     void showEvent(QShowEvent *event) override;
 
 private:
+    void connectForm(FormView &form);
     void refresh();
     void fit();
     void choose(const QString &id, const QString &key);
@@ -38,6 +44,8 @@ private:
     Session &m_session;
     Palette m_look;
     FormView *m_form = nullptr;
+    QScrollArea *m_gasArea = nullptr; ///< where the gas needs more height than the window has
+    GasEditor *m_gas = nullptr;
     HeaderPart m_part = HeaderPart::title;
 };
 

@@ -53,7 +53,7 @@ std::string shown(std::string_view name)
 
 } // namespace
 
-Library::Library() : m_store(std::make_unique<GasStore>()), m_known(std::make_unique<KnownGases>()) {}
+Library::Library() : m_store(std::make_unique<GasStore>()), m_recent(std::make_unique<RecentGases>()) {}
 
 Library::~Library() = default;
 
@@ -204,14 +204,14 @@ Outcome<GergMixture> Library::gergMixture(const Composition &composition) const
     return quasistat::gas::gergMixture(m_store->gergModel(), names, std::move(components));
 }
 
-std::optional<KnownGas> Library::recalled(const std::string &description) const
+std::optional<RecentGas> Library::recalled(const std::string &description) const
 {
-    return m_known->find(description);
+    return m_recent->find(description);
 }
 
-void Library::remember(const std::string &description, KnownGas gas) const
+void Library::remember(const std::string &description, RecentGas gas) const
 {
-    m_known->add(description, std::move(gas));
+    m_recent->add(description, std::move(gas));
 }
 
 } // namespace quasistat::gas

@@ -3,7 +3,7 @@
 
 #include "core/gas/gas.h"
 #include "core/gas/library/component_facts.h"
-#include "core/gas/library/known_gases.h"
+#include "core/gas/library/recent_gases.h"
 
 #include <memory>
 #include <vector>
@@ -57,8 +57,8 @@ public:
 
     /// The gas last made from this description (the text of a document's "gas"), if it is still known: what a gas finds
     /// out about itself at first use, such as its phase boundary, is then not found out again at every change of a path.
-    [[nodiscard]] std::optional<KnownGas> recalled(const std::string &description) const;
-    void remember(const std::string &description, KnownGas gas) const;
+    [[nodiscard]] std::optional<RecentGas> recalled(const std::string &description) const;
+    void remember(const std::string &description, RecentGas gas) const;
 
 private:
     /// “there is no gas named …”, with the names near it among those of `model` (of all, if that is empty).
@@ -69,7 +69,7 @@ private:
     [[nodiscard]] std::vector<std::shared_ptr<const GasData>> gases(std::string_view model) const;
 
     std::unique_ptr<GasStore> m_store;
-    std::unique_ptr<KnownGases> m_known;
+    std::unique_ptr<RecentGases> m_recent;
 };
 
 } // namespace quasistat::gas

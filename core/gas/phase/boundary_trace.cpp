@@ -175,8 +175,9 @@ void BoundaryTrace::follow(IncipientPhase &phase, const IncipientState &start, d
         const IncipientState &state = walk.state();
         m_nodes.push_back(node(phase, state, *slopes));
         const Node &last = m_nodes.back();
-        if (last.lnTemperature < lnLowestTemperature && direction * last.slope < 0.0) return;
-        if (direction * (last.lnDensity - lnLimit) > 0.0) return;
+        m_isComplete = (last.lnTemperature < lnLowestTemperature && direction * last.slope < 0.0) ||
+                       direction * (last.lnDensity - lnLimit) > 0.0;
+        if (m_isComplete) return;
         if (!walk.advance(*slopes)) return;
     }
 }

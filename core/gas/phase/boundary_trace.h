@@ -29,6 +29,9 @@ public:
     };
     [[nodiscard]] const std::vector<Node> &nodes() const { return m_nodes; }
 
+    /// Whether the dense end is where nothing more is to be followed: close packing or the lowest temperature.
+    [[nodiscard]] bool isComplete() const { return m_isComplete; }
+
     /// ln T of the boundary, interpolated; none outside the table.
     [[nodiscard]] std::optional<double> lnTemperature(double lnDensity) const;
     /// The whole state there, interpolated: what Newton starts from.
@@ -47,6 +50,7 @@ private:
     [[nodiscard]] std::size_t interval(double lnDensity) const; ///< index of its lower node
 
     std::vector<Node> m_nodes;
+    bool m_isComplete = false;
 };
 
 } // namespace quasistat::gas

@@ -112,12 +112,23 @@ const DewBoundary::Table &DewBoundary::table() const
         auto table = std::make_unique<Table>();
         IncipientPhase phase(*m_fugacities, m_fractions);
         const double packing = m_fugacities->closestPacking(m_fractions);
-        const auto follow = [&](const IncipientState &start) {
-            const std::optional<double> known = hottest(table->traces, start[phase.density()]).known();
+        const auto follow = [&](IncipientState start) {
             constexpr double same = 1e-4;
-            if (known && std::abs(*known - start[phase.temperature()]) < same) return;
-            BoundaryTrace trace(phase, start, packing, m_lowestTemperature);
-            if (trace.nodes().size() > 1) table->traces.push_back(std::move(trace));
+            constexpr int mostCusps = 3;
+            for (int cusp = 0; cusp <= mostCusps; ++cusp) {
+                const std::optional<double> known = hottest(table->traces, start[phase.density()]).known();
+                if (known && std::abs(*known - start[phase.temperature()]) < same) return;
+                BoundaryTrace trace(phase, start, packing, m_lowestTemperature);
+                if (trace.nodes().size() < 2) return;
+                table->traces.push_back(std::move(trace));
+                // A branch that ends almost at close packing has nothing beyond it that a gas could reach.
+                constexpr double dense = 0.8;
+                const IncipientState &end = table->traces.back().nodes().back().state;
+                if (table->traces.back().isComplete() || end[phase.density()] > std::log(dense * packing)) return;
+                auto next = traceBeyond(*m_fugacities, phase, end);
+                if (!next) return;
+                start = std::move(*next);
+            }
         };
         for (const IncipientState &start : firstTraces(*m_fugacities, phase)) follow(start);
         if (const std::optional<IncipientState> start = firstBubble(*m_fugacities, phase)) follow(*start);

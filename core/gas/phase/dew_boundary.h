@@ -16,10 +16,12 @@ class BoundaryTrace;
 /// On each isochore the highest temperature at which the homogeneous fluid is only just stable against the first trace
 /// of another phase: a liquid below the critical density, a vapour above it. Any number of components, one included.
 ///
-/// Traced at first use, at once for all densities: a few milliseconds for a cubic equation, some tens for GERG-2008.
-/// The trace begins with every liquid that the thin mixture can form and is followed to the dense side. Where it cannot
-/// be followed (an equation that leaves its range, liquids of hydrogen and helium mixtures that close at no density) it
-/// ends, and beyond that density the boundary knows of no second phase.
+/// Traced at first use, at once for all densities: about a millisecond for a cubic equation, some tens for GERG-2008.
+/// It begins with every liquid that the thin mixture can form and with the bubble of the cold liquid; where one branch
+/// ends because another phase takes over, that is looked for and followed too; the hottest branch counts. Where none
+/// can be followed further (an equation outside its range, liquids of hydrogen and helium that close at no density) the
+/// boundary ends, and beyond that density it knows of no second phase. Of 2400 random mixtures by both cubic equations
+/// four ended so, all of them denser than 1/(2b).
 class DewBoundary final : public PhaseBoundary
 {
 public:

@@ -19,4 +19,10 @@ namespace quasistat::gas
 /// pressure of its own ideal vapour (mixtures with much hydrogen or helium).
 [[nodiscard]] std::optional<IncipientState> firstBubble(const Fugacities &fugacities, IncipientPhase &phase);
 
+/// The trace that takes over where one ends in a cusp, `end`: another phase has begun to form before that, so that a
+/// third coexists with both. Found by letting the trace slide to where it is stable a little beyond the cusp, and then
+/// warming the mixture until it only just forms. None where that leads to no other phase.
+[[nodiscard]] std::optional<IncipientState> traceBeyond(const Fugacities &fugacities, IncipientPhase &phase,
+                                                        const IncipientState &end);
+
 } // namespace quasistat::gas

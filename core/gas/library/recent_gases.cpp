@@ -1,20 +1,20 @@
-#include "core/gas/library/known_gases.h"
+#include "core/gas/library/recent_gases.h"
 
 #include <algorithm>
 
 namespace quasistat::gas
 {
 
-std::optional<KnownGas> KnownGases::find(const std::string &description)
+std::optional<RecentGas> RecentGases::find(const std::string &description)
 {
     const std::scoped_lock lock(m_mutex);
-    const auto it = std::ranges::find(m_gases, description, &std::pair<std::string, KnownGas>::first);
+    const auto it = std::ranges::find(m_gases, description, &std::pair<std::string, RecentGas>::first);
     if (it == m_gases.end()) return std::nullopt;
     std::rotate(m_gases.begin(), it, it + 1);
     return m_gases.front().second;
 }
 
-void KnownGases::add(const std::string &description, KnownGas gas)
+void RecentGases::add(const std::string &description, RecentGas gas)
 {
     const std::scoped_lock lock(m_mutex);
     m_gases.emplace_front(description, std::move(gas));
