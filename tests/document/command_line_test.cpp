@@ -151,8 +151,7 @@ TEST_F(CommandLine, PartsNotComputedAreRefusedByName)
     const struct {
         const char *name;
         const char *pointer;
-    } rows[] = {{"gas-gerg", ": /gas/model: "},
-                {"nitrogen-reference", ": /gas/model: "},
+    } rows[] = {{"nitrogen-reference", ": /segments/2/kind: "},
                 {"machines-and-throttle", ": /segments/0/kind: "},
                 {"matter", ": /segments/0/kind: "}};
     for (const auto &row : rows) {
@@ -186,6 +185,15 @@ TEST_F(CommandLine, GasesListsModelsAndSources)
     EXPECT_THAT(result.output, HasSubstr("NASA"));
     const Json json = Json::parse(run("gases --json").output, nullptr, false);
     EXPECT_GT(json["models"][1]["gases"].size(), 40U);
+    for (const Json &model : json["models"]) {
+        if (!model.contains("gases")) continue;
+        for (const Json &gas : model["gases"]) {
+            EXPECT_EQ(gas["temperature"].size(), 2U) << gas;
+            EXPECT_FALSE(gas["source"].empty()) << gas;
+        }
+    }
+    EXPECT_EQ(json["models"].size(), 6U);
+    EXPECT_THAT(result.output, HasSubstr("0.02 % in density"));
 }
 
 TEST_F(CommandLine, WrongUsageIs64AndSaysWhatIsRight)

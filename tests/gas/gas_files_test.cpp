@@ -80,7 +80,7 @@ TEST(GasFiles, ReferenceEquationsHaveRangesInOrderAndTheirOwnGasConstant)
         EXPECT_EQ(reference->ideal.reducingTemperature, reference->residual.reducingTemperature);
         EXPECT_FALSE(reference->residual.powers.empty());
     }
-    EXPECT_EQ(count, 29);
+    EXPECT_GE(count, 29);
 }
 
 TEST(GasFiles, AncillariesMeetAtTheCriticalPoint)

@@ -12,7 +12,7 @@ namespace
 TEST(Library, KnowsItsComponentsByNameAndFormula)
 {
     const Library &library = test::library();
-    EXPECT_EQ(library.components("ideal").size(), 47u);
+    EXPECT_GE(library.components("ideal").size(), 47u);
     EXPECT_EQ(*library.componentName("N2"), "nitrogen");
     EXPECT_EQ(*library.componentName("carbon dioxide"), "carbon dioxide");
     EXPECT_EQ(*library.componentName("n-butane"), "n-butane");
@@ -60,14 +60,12 @@ TEST(Library, SaysWhichModelsHaveAGasThatThisOneHasNot)
 
 TEST(Library, EachModelHasItsGasesWithRangeAndSource)
 {
-    const std::map<std::string_view, std::size_t> expected{{"ideal", 47}, {"gerg-2008", 21}, {"reference", 29}};
+    const std::map<std::string_view, std::size_t> expected{
+        {"ideal", 47}, {"peng-robinson", 40}, {"soave-redlich-kwong", 40}, {"gerg-2008", 21}, {"reference", 29}};
     for (const std::string_view model : modelsOfGases()) {
         SCOPED_TRACE(model);
         const std::vector<ComponentFacts> components = test::library().components(model);
-        if (expected.contains(model)) {
-            EXPECT_EQ(components.size(), expected.at(model));
-        }
-        EXPECT_GE(components.size(), 21u);
+        EXPECT_GE(components.size(), expected.at(model));
         for (const ComponentFacts &facts : components) {
             SCOPED_TRACE(facts.name);
             EXPECT_FALSE(facts.source.empty());
@@ -92,7 +90,7 @@ TEST(Library, MayBeAskedByManyThreadsAtOnce)
     std::atomic<std::size_t> found = 0;
     for (int i = 0; i < 4; ++i) threads.emplace_back([&] { found += library.components("reference").size(); });
     for (std::thread &thread : threads) thread.join();
-    EXPECT_EQ(found, 4u * 29u);
+    EXPECT_EQ(found, 4u * test::library().components("reference").size());
 }
 
 TEST(Library, RefusesAMixtureOfNothingAndOfStrangers)
