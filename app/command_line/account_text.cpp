@@ -231,7 +231,10 @@ std::string warningsText(const std::vector<Warning> &warnings, const DisplayUnit
 std::string gasText(const gas::Gas &gas)
 {
     const std::string name = gas.name().empty() ? std::string() : gas.name() + ", ";
-    return name + (gas.model() == "perfect" ? "perfect gas" : "ideal gas");
+    const std::string_view model = gas.model();
+    if (model == "perfect") return name + "perfect gas";
+    if (model == "ideal") return name + "ideal gas";
+    return name + (model == "reference" ? "reference equation" : std::string(model));
 }
 
 std::string headerText(const document::Design &design, const Evaluation &evaluation, const DisplayUnits &units)

@@ -84,6 +84,7 @@ public:
         if (m_style.isPrint()) addSegments(waiting);
         addLimits(waiting);
         addCritical(waiting);
+        addDewLine(waiting);
         return waiting;
     }
 
@@ -184,6 +185,24 @@ private:
         waiting.add(text, {.size = {},
                            .anchors = {*m_scene.phase.critical},
                            .clearance = 6.0,
+                           .farthest = 30.0,
+                           .optional = true});
+    }
+
+    void addDewLine(Waiting &waiting) const
+    {
+        if (!m_scene.phase.isDewLine || m_scene.phase.boundary.isEmpty()) return;
+        const auto &lines = m_scene.phase.boundary;
+        const auto longest = std::max_element(lines.begin(), lines.end(), [](const auto &a, const auto &b) {
+            return lengthOf(a) < lengthOf(b);
+        });
+        if (lengthOf(*longest) < 60.0) return;
+        LabelScene text = label();
+        text.lines.append({RichText::plain(tr("dew line")), {}, m_plain, 0.75});
+        waiting.add(text, {.size = {},
+                           .anchors = pointsOn(*longest),
+                           .clearance = 5.0,
+                           .beside = 4.0,
                            .farthest = 30.0,
                            .optional = true});
     }
@@ -300,6 +319,7 @@ Occupied occupied(const Scene &scene)
     for (const auto &segment : scene.segments)
         for (const auto &piece : segment.limit) result.quiet.push_back(piece);
     for (const auto &piece : scene.phase.boundary) result.quiet.push_back(piece);
+    for (const auto &fraction : scene.phase.fractions) result.quiet.push_back(fraction.line);
     if (scene.phase.critical)
         result.blocks.push_back(QRectF(*scene.phase.critical - QPointF(4, 4), QSizeF(8, 8)));
     for (const auto &crossing : scene.crossings) {

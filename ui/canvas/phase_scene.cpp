@@ -46,6 +46,21 @@ QPolygonF insideOf(const PhaseLines &lines, const Plane &plane)
     return liquid + vapour;
 }
 
+/// In a low dome only as many lines as can be told apart.
+void addFractions(PhaseScene &scene, const PhaseLines &lines, const Plane &plane)
+{
+    constexpr double leastForEven = 50.0; // [px]
+    constexpr double leastForAll = 140.0;
+    const double height = scene.inside.boundingRect().height();
+    for (const PhaseLine &line : lines.lines) {
+        if (line.kind != PhaseLine::Kind::equalVapourFraction) continue;
+        const bool isEven = std::lround(10.0 * line.vapourFraction) % 2 == 0;
+        if (height < (isEven ? leastForEven : leastForAll)) continue;
+        for (const QPolygonF &piece : clippedLine(thinned(pixels(line, plane)), plane.rect))
+            scene.fractions.append({piece, line.vapourFraction});
+    }
+}
+
 bool isFree(const QRectF &plate, const Scene &scene, const QPolygonF *own)
 {
     if (!scene.plane.rect.adjusted(3, 3, -3, -3).contains(plate)) return false;
@@ -94,12 +109,11 @@ PhaseScene phaseScene(const PhaseLines &lines, const Plane &plane)
     PhaseScene scene;
     for (const PhaseLine &line : lines.lines) {
         const QList<QPolygonF> pieces = clippedLine(thinned(pixels(line, plane)), plane.rect);
-        if (line.kind != PhaseLine::Kind::equalVapourFraction)
-            scene.boundary += pieces;
-        else
-            for (const QPolygonF &piece : pieces) scene.fractions.append({piece, line.vapourFraction});
+        scene.isDewLine = scene.isDewLine || line.kind == PhaseLine::Kind::dewLine;
+        if (line.kind != PhaseLine::Kind::equalVapourFraction) scene.boundary += pieces;
     }
     scene.inside = clippedArea(thinned(insideOf(lines, plane)), plane.rect);
+    addFractions(scene, lines, plane);
     if (lines.critical) {
         const QPointF at = plane.pixel(lines.critical->first, lines.critical->second);
         if (plane.rect.contains(at)) scene.critical = at;

@@ -81,7 +81,8 @@ struct FractionLabel {
 /// The phase boundary as far as it comes into the plot.
 struct PhaseScene {
     QPolygonF inside; ///< of the dome
-    QList<QPolygonF> boundary;
+    QList<QPolygonF> boundary; ///< saturated vapour and liquid, or the dew line of a mixture
+    bool isDewLine = false;
     QList<FractionLine> fractions;
     QList<FractionLabel> fractionLabels;
     std::optional<QPointF> critical;

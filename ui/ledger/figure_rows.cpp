@@ -235,7 +235,7 @@ std::vector<LedgerRow> segmentFigureRows(const Snapshot &snapshot, int segment, 
     const double sign = shownSign(snapshot.units);
     FigureList list(QStringLiteral("segment."), open, snapshot.units);
     list.add("delta_enthalpy", QStringLiteral("Δ<i>H</i>"), result.deltaEnthalpy, Quantity::energy);
-    list.add("delta_entropy", QStringLiteral("Δ<i>S</i>"), result.deltaEntropy, Quantity::entropy);
+    list.add("delta_entropy", QStringLiteral("Δ<i>S</i>"), entropyChange(result.from, result.to), Quantity::entropy);
     if (result.steadyFlowWork)
         list.add("steady_flow_work", say("steady-flow work"), sign * *result.steadyFlowWork, Quantity::energy);
     if (result.rodWork) list.add("rod_work", say("rod work"), sign * *result.rodWork, Quantity::energy);

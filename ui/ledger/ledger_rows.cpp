@@ -78,7 +78,10 @@ std::vector<LedgerRow> warningRows(const Snapshot &snapshot)
 {
     std::vector<LedgerRow> rows;
     const path::PathResult &path = snapshot.evaluation->path;
+    QStringList said; // a segment's own warnings may stand among the path's too
     const auto add = [&](const QString &sentence, int segment) {
+        if (said.contains(sentence)) return;
+        said << sentence;
         LedgerRow row = textRow(LedgerRowKind::warning, sentence);
         row.segment = segment;
         rows.push_back(row);

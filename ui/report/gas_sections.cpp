@@ -62,7 +62,7 @@ std::optional<double> idealFigure(const SegmentResult &segment, double path::Ide
 /// Puts a column of words behind the last one.
 void addWords(std::vector<TableColumn> &columns, std::vector<TableRow> &rows, const QStringList &words)
 {
-    columns.push_back({RichText::plain(say("off by")), 0.85, Align::right});
+    columns.push_back({RichText::plain(say("off\u00a0by")), 0.85, Align::right});
     for (std::size_t r = 0; r < rows.size(); ++r)
         rows[r].cells.push_back({RichText::plain(words.at(static_cast<qsizetype>(r))), {}});
 }

@@ -91,7 +91,7 @@ std::vector<Block> statesSection(const ReportContent &content)
         {QStringLiteral("<i>U</i> − <i>U</i><sub>1</sub>"), Quantity::energy,
          valuesOf(states, [&](const auto &s) { return s.state.internalEnergy() - first.internalEnergy(); })},
         {QStringLiteral("<i>S</i> − <i>S</i><sub>1</sub>"), Quantity::entropy,
-         valuesOf(states, [&](const auto &s) { return s.state.entropy() - first.entropy(); })},
+         valuesOf(states, [&](const auto &s) { return entropyChange(first, s.state); })},
         {say("amount"), Quantity::amount, valuesOf(states, [](const auto &s) { return s.state.amount(); })},
         {say("stored energy"), Quantity::energy, valuesOf(states, [](const auto &s) {
              return s.storedEnergy ? std::optional(s.storedEnergy->real) : std::nullopt;
@@ -179,7 +179,7 @@ std::vector<Block> limitsReachedSection(const ReportContent &content)
         {QStringLiteral("Δ<i>H</i>"), Quantity::energy,
          valuesOf(path.segments, [](const SegmentResult &s) { return s.deltaEnthalpy; }), energy},
         {QStringLiteral("Δ<i>S</i>"), Quantity::entropy,
-         valuesOf(path.segments, [](const SegmentResult &s) { return s.deltaEntropy; })},
+         valuesOf(path.segments, [](const SegmentResult &s) { return entropyChange(s.from, s.to); })},
         {QStringLiteral("<i>W</i><sub>flow</sub>"), Quantity::energy, signedFigure(&SegmentResult::steadyFlowWork),
          energy},
         {QStringLiteral("<i>W</i><sub>rod</sub>"), Quantity::energy, signedFigure(&SegmentResult::rodWork), energy},

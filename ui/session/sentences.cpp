@@ -2,6 +2,7 @@
 
 #include <QCoreApplication>
 
+#include <algorithm>
 #include <array>
 #include <cmath>
 
@@ -58,6 +59,15 @@ QString sentenceOf(const Failure &failure, const units::DisplayUnits &units)
 double shownSign(const units::DisplayUnits &units)
 {
     return units.workByGas ? -1.0 : 1.0;
+}
+
+double entropyChange(const gas::State &from, const gas::State &to)
+{
+    constexpr double rounding = 1e-10; // what a solver for an isentrope leaves, with room
+    const double change = to.entropy() - from.entropy();
+    const double scale = std::max({std::abs(from.entropy()), std::abs(to.entropy()),
+                                   to.amount() * to.gas().gasConstant()});
+    return std::abs(change) <= rounding * scale ? 0.0 : change;
 }
 
 QString figure(double value, const units::Scale &scale)

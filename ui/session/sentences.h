@@ -2,6 +2,7 @@
 // Figures and sentences of the core in Qt's strings and the units of the display.
 
 #include "core/analysis/envelope.h"
+#include "core/gas/state.h"
 #include "core/outcome/outcome.h"
 #include "core/units/display.h"
 
@@ -15,6 +16,9 @@ namespace quasistat::ui
 
 /// +1: work and heat are shown positive into the gas, −1: by the gas.
 [[nodiscard]] double shownSign(const units::DisplayUnits &units);
+
+/// Entropy of `to` less that of `from` [J/K]; 0 where nothing is left but the rounding of both.
+[[nodiscard]] double entropyChange(const gas::State &from, const gas::State &to);
 
 /// The digits of `value` [SI] at the scale's decimals.
 [[nodiscard]] QString figure(double value, const units::Scale &scale);
