@@ -157,8 +157,8 @@ void PhaseTest::where_a_segment_enters_two_phases_it_is_marked_and_said()
     analysis::Evaluation evaluation = *snapshot.evaluation;
     // The state half-way stands in for one on a boundary.
     const gas::State &from = evaluation.path.states[0].state;
-    const auto half = gas::stateFrom(from.gas(), {gas::Property::temperature, *from.temperature()},
-                                     {gas::Property::pressure, 4e5});
+    const auto half =
+        gas::stateFrom(from.gas(), {gas::Property::temperature, *from.temperature()}, {gas::Property::pressure, 4e5});
     QVERIFY(half);
     evaluation.path.segments[0].phaseCrossings.push_back({gas::State(from.sharedGas(), from.amount(), *half), true});
     snapshot.evaluation = std::make_shared<const analysis::Evaluation>(evaluation);

@@ -164,14 +164,14 @@ private:
     {
         for (const CrossingScene &crossing : m_scene.crossings) {
             LabelScene text = label();
-            const QString pressure = QString::fromStdString(
-                units::shown(crossing.pressure, units::Quantity::pressure, m_snapshot.units));
-            text.lines.append({RichText::plain((crossing.entersTwoPhase ? tr("enters two phases, %1")
-                                                                        : tr("leaves two phases, %1"))
-                                                   .arg(pressure)),
-                               {},
-                               m_plain,
-                               0.9});
+            const QString pressure =
+                QString::fromStdString(units::shown(crossing.pressure, units::Quantity::pressure, m_snapshot.units));
+            text.lines.append(
+                {RichText::plain((crossing.entersTwoPhase ? tr("enters two phases, %1") : tr("leaves two phases, %1"))
+                                     .arg(pressure)),
+                 {},
+                 m_plain,
+                 0.9});
             waiting.add(text, {.size = {}, .anchors = {crossing.centre}, .clearance = 8.0});
         }
     }
@@ -182,9 +182,11 @@ private:
         LabelScene text = label();
         text.plateOpacity = 0.7;
         text.lines.append({RichText::plain(tr("critical point")), {}, m_plain, 0.75});
+        const QPointF at = *m_scene.phase.critical;
         waiting.add(text, {.size = {},
-                           .anchors = {*m_scene.phase.critical},
+                           .anchors = {at},
                            .clearance = 6.0,
+                           .region = QRectF(at + QPointF(-30.0, -40.0), QSizeF(160.0, 34.0)), // off the dome
                            .farthest = 30.0,
                            .optional = true});
     }
@@ -193,9 +195,8 @@ private:
     {
         if (!m_scene.phase.isDewLine || m_scene.phase.boundary.isEmpty()) return;
         const auto &lines = m_scene.phase.boundary;
-        const auto longest = std::max_element(lines.begin(), lines.end(), [](const auto &a, const auto &b) {
-            return lengthOf(a) < lengthOf(b);
-        });
+        const auto longest = std::max_element(lines.begin(), lines.end(),
+                                              [](const auto &a, const auto &b) { return lengthOf(a) < lengthOf(b); });
         if (lengthOf(*longest) < 60.0) return;
         LabelScene text = label();
         text.lines.append({RichText::plain(tr("dew line")), {}, m_plain, 0.75});
@@ -320,8 +321,7 @@ Occupied occupied(const Scene &scene)
         for (const auto &piece : segment.limit) result.quiet.push_back(piece);
     for (const auto &piece : scene.phase.boundary) result.quiet.push_back(piece);
     for (const auto &fraction : scene.phase.fractions) result.quiet.push_back(fraction.line);
-    if (scene.phase.critical)
-        result.blocks.push_back(QRectF(*scene.phase.critical - QPointF(4, 4), QSizeF(8, 8)));
+    if (scene.phase.critical) result.blocks.push_back(QRectF(*scene.phase.critical - QPointF(4, 4), QSizeF(8, 8)));
     for (const auto &crossing : scene.crossings) {
         result.things.push_back(crossing.centre);
         result.blocks.push_back(QRectF(crossing.centre - QPointF(5, 5), QSizeF(10, 10)));

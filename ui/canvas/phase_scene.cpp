@@ -77,8 +77,7 @@ bool isFree(const QRectF &plate, const Scene &scene, const QPolygonF *own)
     };
     for (const SegmentScene &segment : scene.segments)
         if (std::ranges::any_of(segment.line, crosses)) return false;
-    return std::ranges::none_of(scene.phase.boundary, crosses) &&
-           std::ranges::none_of(scene.boundary.lines, crosses) &&
+    return std::ranges::none_of(scene.phase.boundary, crosses) && std::ranges::none_of(scene.boundary.lines, crosses) &&
            std::ranges::none_of(scene.phase.fractions, [&](const FractionLine &line) { return crosses(line.line); });
 }
 

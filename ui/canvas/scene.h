@@ -80,7 +80,7 @@ struct FractionLabel {
 
 /// The phase boundary as far as it comes into the plot.
 struct PhaseScene {
-    QPolygonF inside; ///< of the dome
+    QPolygonF inside;          ///< of the dome
     QList<QPolygonF> boundary; ///< saturated vapour and liquid, or the dew line of a mixture
     bool isDewLine = false;
     QList<FractionLine> fractions;
