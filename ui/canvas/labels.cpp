@@ -83,7 +83,6 @@ public:
         addFailure(waiting);
         if (m_style.isPrint()) addSegments(waiting);
         addLimits(waiting);
-        addCritical(waiting);
         addDewLine(waiting);
         return waiting;
     }
@@ -174,21 +173,6 @@ private:
                  0.9});
             waiting.add(text, {.size = {}, .anchors = {crossing.centre}, .clearance = 8.0});
         }
-    }
-
-    void addCritical(Waiting &waiting) const
-    {
-        if (!m_scene.phase.critical) return;
-        LabelScene text = label();
-        text.plateOpacity = 0.7;
-        text.lines.append({RichText::plain(tr("critical point")), {}, m_plain, 0.75});
-        const QPointF at = *m_scene.phase.critical;
-        waiting.add(text, {.size = {},
-                           .anchors = {at},
-                           .clearance = 6.0,
-                           .region = QRectF(at + QPointF(-30.0, -40.0), QSizeF(160.0, 34.0)), // off the dome
-                           .farthest = 30.0,
-                           .optional = true});
     }
 
     void addDewLine(Waiting &waiting) const

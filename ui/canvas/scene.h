@@ -72,8 +72,8 @@ struct FractionLine {
     QPolygonF line;
     double vapourFraction;
 };
-/// Its figure, standing on it.
-struct FractionLabel {
+/// A figure that stands on its line, or the name of the critical point.
+struct PhaseLabel {
     QRectF plate;
     QString text;
 };
@@ -84,7 +84,7 @@ struct PhaseScene {
     QList<QPolygonF> boundary; ///< saturated vapour and liquid, or the dew line of a mixture
     bool isDewLine = false;
     QList<FractionLine> fractions;
-    QList<FractionLabel> fractionLabels;
+    QList<PhaseLabel> labels;
     std::optional<QPointF> critical;
 };
 
