@@ -376,7 +376,8 @@ void GasTest::differences_are_given_in_percent_and_kelvin()
     const QString minus(QChar(0x2212));
     const QString space(QChar(0x202F));
     QCOMPARE(percentOff(101.3, 100.0, 100.0), QStringLiteral("+1.3") + space + QStringLiteral("%"));
-    QCOMPARE(percentOff(-110.0, -100.0, 100.0), minus + QStringLiteral("10") + space + QStringLiteral("%"));
+    QCOMPARE(percentOff(-110.0, -100.0, 100.0), QStringLiteral("+10") + space + QStringLiteral("%")); // larger
+    QCOMPARE(percentOff(50.0, 100.0, 100.0), minus + QStringLiteral("50") + space + QStringLiteral("%"));
     QCOMPARE(percentOff(3.0, 0.0, 100.0), QStringLiteral("–")); // nothing to be a percentage of
     units::DisplayUnits units;
     QCOMPARE(degreesOff(303.2, 300.0, units), QStringLiteral("+3.2") + space + QStringLiteral("K"));

@@ -218,9 +218,7 @@ void LedgerTest::the_ideal_gas_stands_beside_the_real_one()
     const QString minus(QChar(0x2212));
     const QString space(QChar(0x202F));
     QCOMPARE(first.remarks[0], minus + QStringLiteral("10") + space + QStringLiteral("%"));
-    const bool isHeatIn = evaluation.path.segments[0].heat > 0.0;
-    QCOMPARE(first.remarks[1], (isHeatIn ? QStringLiteral("+") : minus) + QStringLiteral("20") + space +
-                                   QStringLiteral("%"));
+    QCOMPARE(first.remarks[1], QStringLiteral("+20") + space + QStringLiteral("%"));
     QCOMPARE(first.remarks[2], QStringLiteral("+4.0") + space + QStringLiteral("K"));
     const units::Scale scale = accountScale(evaluation.path, snapshot.units);
     QVERIFY(std::abs(numberOf(first.figures[0]) - 0.9 * evaluation.path.segments[0].work * scale.factor) <

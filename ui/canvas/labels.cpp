@@ -83,7 +83,6 @@ public:
         addFailure(waiting);
         if (m_style.isPrint()) addSegments(waiting);
         addLimits(waiting);
-        addCritical(waiting);
         addDewLine(waiting);
         return waiting;
     }
@@ -164,38 +163,24 @@ private:
     {
         for (const CrossingScene &crossing : m_scene.crossings) {
             LabelScene text = label();
-            const QString pressure = QString::fromStdString(
-                units::shown(crossing.pressure, units::Quantity::pressure, m_snapshot.units));
-            text.lines.append({RichText::plain((crossing.entersTwoPhase ? tr("enters two phases, %1")
-                                                                        : tr("leaves two phases, %1"))
-                                                   .arg(pressure)),
-                               {},
-                               m_plain,
-                               0.9});
+            const QString pressure =
+                QString::fromStdString(units::shown(crossing.pressure, units::Quantity::pressure, m_snapshot.units));
+            text.lines.append(
+                {RichText::plain((crossing.entersTwoPhase ? tr("enters two phases, %1") : tr("leaves two phases, %1"))
+                                     .arg(pressure)),
+                 {},
+                 m_plain,
+                 0.9});
             waiting.add(text, {.size = {}, .anchors = {crossing.centre}, .clearance = 8.0});
         }
-    }
-
-    void addCritical(Waiting &waiting) const
-    {
-        if (!m_scene.phase.critical) return;
-        LabelScene text = label();
-        text.plateOpacity = 0.7;
-        text.lines.append({RichText::plain(tr("critical point")), {}, m_plain, 0.75});
-        waiting.add(text, {.size = {},
-                           .anchors = {*m_scene.phase.critical},
-                           .clearance = 6.0,
-                           .farthest = 30.0,
-                           .optional = true});
     }
 
     void addDewLine(Waiting &waiting) const
     {
         if (!m_scene.phase.isDewLine || m_scene.phase.boundary.isEmpty()) return;
         const auto &lines = m_scene.phase.boundary;
-        const auto longest = std::max_element(lines.begin(), lines.end(), [](const auto &a, const auto &b) {
-            return lengthOf(a) < lengthOf(b);
-        });
+        const auto longest = std::max_element(lines.begin(), lines.end(),
+                                              [](const auto &a, const auto &b) { return lengthOf(a) < lengthOf(b); });
         if (lengthOf(*longest) < 60.0) return;
         LabelScene text = label();
         text.lines.append({RichText::plain(tr("dew line")), {}, m_plain, 0.75});
@@ -320,8 +305,7 @@ Occupied occupied(const Scene &scene)
         for (const auto &piece : segment.limit) result.quiet.push_back(piece);
     for (const auto &piece : scene.phase.boundary) result.quiet.push_back(piece);
     for (const auto &fraction : scene.phase.fractions) result.quiet.push_back(fraction.line);
-    if (scene.phase.critical)
-        result.blocks.push_back(QRectF(*scene.phase.critical - QPointF(4, 4), QSizeF(8, 8)));
+    if (scene.phase.critical) result.blocks.push_back(QRectF(*scene.phase.critical - QPointF(4, 4), QSizeF(8, 8)));
     for (const auto &crossing : scene.crossings) {
         result.things.push_back(crossing.centre);
         result.blocks.push_back(QRectF(crossing.centre - QPointF(5, 5), QSizeF(10, 10)));

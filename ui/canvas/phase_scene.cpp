@@ -4,6 +4,8 @@
 #include "ui/look/figure_text.h"
 #include "ui/session/design_reading.h"
 
+#include <QCoreApplication>
+
 #include <algorithm>
 #include <cmath>
 
@@ -69,7 +71,7 @@ bool isFree(const QRectF &plate, const Scene &scene, const QPolygonF *own)
         if (label.plate.intersects(wide)) return false;
     for (const HandleScene &handle : scene.handles)
         if (wide.adjusted(-8, -8, 8, 8).contains(handle.centre)) return false;
-    for (const FractionLabel &label : scene.phase.fractionLabels)
+    for (const PhaseLabel &label : scene.phase.labels)
         if (label.plate.intersects(wide)) return false;
     const auto crosses = [&](const QPolygonF &line) {
         return &line != own && line.boundingRect().adjusted(-1, -1, 1, 1).intersects(wide) &&
@@ -77,8 +79,7 @@ bool isFree(const QRectF &plate, const Scene &scene, const QPolygonF *own)
     };
     for (const SegmentScene &segment : scene.segments)
         if (std::ranges::any_of(segment.line, crosses)) return false;
-    return std::ranges::none_of(scene.phase.boundary, crosses) &&
-           std::ranges::none_of(scene.boundary.lines, crosses) &&
+    return std::ranges::none_of(scene.phase.boundary, crosses) && std::ranges::none_of(scene.boundary.lines, crosses) &&
            std::ranges::none_of(scene.phase.fractions, [&](const FractionLine &line) { return crosses(line.line); });
 }
 
@@ -133,6 +134,21 @@ QList<CrossingScene> crossingScenes(const path::PathResult &path, const Plane &p
     return crossings;
 }
 
+void addCriticalLabel(Scene &scene, const DiagramStyle &style)
+{
+    if (!scene.phase.critical) return;
+    const QFont font = style.font(style.type(10));
+    const QString text = QCoreApplication::translate("Diagram", "critical point");
+    const QSizeF size(textWidth(text, font) + 6.0, font.pixelSize() + 4.0);
+    const double above = size.height() + 7.0;
+    for (const double left : {-0.5 * size.width(), 2.0, -2.0 - size.width()}) {
+        const QRectF plate(*scene.phase.critical + QPointF(left, -above), size);
+        if (!isFree(plate, scene, nullptr)) continue;
+        scene.phase.labels.append({plate, text});
+        return;
+    }
+}
+
 void addFractionLabels(Scene &scene, const DiagramStyle &style)
 {
     const QFont font = style.font(style.type(10));
@@ -145,7 +161,7 @@ void addFractionLabels(Scene &scene, const DiagramStyle &style)
             const QPointF centre = pointAlong(fraction.line, share * length).point;
             const QRectF plate(centre - QPointF(size.width(), size.height()) / 2.0, size);
             if (!isFree(plate, scene, &fraction.line)) continue;
-            scene.phase.fractionLabels.append({plate, text});
+            scene.phase.labels.append({plate, text});
             break;
         }
     }

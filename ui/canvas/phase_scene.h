@@ -29,6 +29,8 @@ private:
 /// Marks where segments meet the boundary.
 [[nodiscard]] QList<CrossingScene> crossingScenes(const path::PathResult &path, const Plane &plane);
 
+/// Names the critical point above the dome if nothing drawn is there; the other labels then keep clear of it.
+void addCriticalLabel(Scene &scene, const DiagramStyle &style);
 /// Writes the vapour fraction on its lines where nothing else stands. All other labels of `scene` are placed.
 void addFractionLabels(Scene &scene, const DiagramStyle &style);
 

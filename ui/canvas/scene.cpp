@@ -79,6 +79,7 @@ Scene sceneOf(const Snapshot &snapshot, const Plane &plane, const AxisScene &axe
     std::vector<QPolygonF> avoid = linesOf(scene);
     for (const auto &handle : scene.handles) avoid.push_back(roomOf(handle));
     scene.boundary = boundaryScene(snapshot, plane, style, avoid, beside);
+    addCriticalLabel(scene, style);
     addLabels(scene, snapshot, style, beside);
     addFractionLabels(scene, style);
     return scene;

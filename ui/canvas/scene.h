@@ -72,19 +72,19 @@ struct FractionLine {
     QPolygonF line;
     double vapourFraction;
 };
-/// Its figure, standing on it.
-struct FractionLabel {
+/// A figure that stands on its line, or the name of the critical point.
+struct PhaseLabel {
     QRectF plate;
     QString text;
 };
 
 /// The phase boundary as far as it comes into the plot.
 struct PhaseScene {
-    QPolygonF inside; ///< of the dome
+    QPolygonF inside;          ///< of the dome
     QList<QPolygonF> boundary; ///< saturated vapour and liquid, or the dew line of a mixture
     bool isDewLine = false;
     QList<FractionLine> fractions;
-    QList<FractionLabel> fractionLabels;
+    QList<PhaseLabel> labels;
     std::optional<QPointF> critical;
 };
 

@@ -96,7 +96,7 @@ void paintPhases(QPainter &painter, const Painting &p)
     painter.setPen(rounded(faded(ink, 0.62), p.style.isPrint() ? 1.2 : 1.5));
     drawLines(painter, phase.boundary);
     const QFont font = p.style.font(p.style.type(10));
-    for (const FractionLabel &label : phase.fractionLabels) {
+    for (const PhaseLabel &label : phase.labels) {
         painter.fillRect(label.plate, faded(ground, 0.82));
         painter.setPen(faded(ink, 0.7));
         drawText(painter, label.plate.center() + QPointF(0.0, 0.36 * font.pixelSize()), label.text, font,

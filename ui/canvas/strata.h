@@ -12,12 +12,24 @@ namespace quasistat::ui
 
 /// From the bottom to the top. `emphasis` is what follows the pointer and the selection.
 enum class Stratum {
-    forbidden, grid, areas, phases, hatch, axes, ghosts, boundary, halo, curves, emphasis, handles, labels
+    forbidden,
+    grid,
+    areas,
+    phases,
+    hatch,
+    axes,
+    ghosts,
+    boundary,
+    halo,
+    curves,
+    emphasis,
+    handles,
+    labels
 };
-inline constexpr std::array strata{Stratum::forbidden, Stratum::grid,     Stratum::areas,    Stratum::phases,
-                                   Stratum::hatch,
-                                   Stratum::axes,      Stratum::ghosts,   Stratum::boundary, Stratum::halo,
-                                   Stratum::curves,    Stratum::emphasis, Stratum::handles,  Stratum::labels};
+inline constexpr std::array strata{Stratum::forbidden, Stratum::grid,   Stratum::areas,    Stratum::phases,
+                                   Stratum::hatch,     Stratum::axes,   Stratum::ghosts,   Stratum::boundary,
+                                   Stratum::halo,      Stratum::curves, Stratum::emphasis, Stratum::handles,
+                                   Stratum::labels};
 
 /// Segments from 0; −1: none.
 struct Emphasis {

@@ -40,7 +40,7 @@ struct FormField {
     units::Quantity quantity = units::Quantity::number;
     QString value{}; ///< as typed
     QString placeholder{};
-    bool optional = false; ///< may be left blank
+    bool optional = false;                 ///< may be left blank
     std::vector<Suggestion> suggestions{}; ///< offered while typing
 };
 

@@ -41,8 +41,8 @@ public:
     [[nodiscard]] QString rowWords(int row) const;
 
 signals:
-    void typed();   ///< the draft is another one, while a text is being typed
-    void changed(); ///< the draft is another one and stands
+    void typed();    ///< the draft is another one, while a text is being typed
+    void changed();  ///< the draft is another one and stands
     void restored(); ///< Esc in a changed text
     void escaped();
 

@@ -129,7 +129,8 @@ void GasEditor::refreshMixture()
     const std::string model = modelOf(design);
     m_composition->setVisible(takesMixture(model));
     if (takesMixture(model)) {
-        m_composition->setGases(gasesOf(model, m_session.library()), isCubic(model) ? ownGasNames(design) : QStringList());
+        m_composition->setGases(gasesOf(model, m_session.library()),
+                                isCubic(model) ? ownGasNames(design) : QStringList());
         const MixtureDraft now = mixtureDraft(design);
         // A draft that is not whole yet stays until the document's own composition becomes another one.
         if (now != m_shownMixture || m_composition->rowCount() == 0) {

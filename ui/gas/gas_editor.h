@@ -62,7 +62,7 @@ private:
     QPushButton *m_showInteractions = nullptr;
     FormView *m_interactions = nullptr;
     QPushButton *m_addOwn = nullptr;
-    std::vector<OwnGas> m_own;    ///< as typed, some perhaps not in the document yet
+    std::vector<OwnGas> m_own;      ///< as typed, some perhaps not in the document yet
     std::vector<OwnGas> m_shownOwn; ///< what the document held when they were shown
     std::vector<OwnLine> m_ownLines;
     MixtureDraft m_shownMixture; ///< what the document held when the rows were shown

@@ -66,9 +66,7 @@ QString shortName(const Design &design)
         const auto most = std::max_element(shares->begin(), shares->end(), [](const Json &a, const Json &b) {
             return typed(&a).toDouble() < typed(&b).toDouble();
         });
-        return say("%1 %2 and %3 more")
-            .arg(QString::fromStdString(most.key()), typed(&*most))
-            .arg(shares->size() - 1);
+        return say("%1 %2 and %3 more").arg(QString::fromStdString(most.key()), typed(&*most)).arg(shares->size() - 1);
     }
     return gasName(design);
 }

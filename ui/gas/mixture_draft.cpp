@@ -149,7 +149,8 @@ Design withMixture(const Design &design, const MixtureDraft &draft)
 {
     Json shares = Json::object();
     for (const MixtureRow &row : draft.rows)
-        if (!row.name.trimmed().isEmpty()) shares[row.name.trimmed().toStdString()] = numberAsTyped(row.share.trimmed());
+        if (!row.name.trimmed().isEmpty())
+            shares[row.name.trimmed().toStdString()] = numberAsTyped(row.share.trimmed());
     // In the place where it stood: the order of the file is kept.
     Json gas = Json::object();
     Json before = Json::object();

@@ -28,10 +28,10 @@ struct MixtureDraft {
 
 /// What a draft comes to.
 struct MixtureVerdict {
-    std::optional<double> sum;     ///< none while a fraction is no number
-    QString words;                 ///< the sum, and what is wrong with the whole
-    QMap<int, QString> rowWords;   ///< what is wrong with a row
-    bool isWhole = false;          ///< can stand in the document
+    std::optional<double> sum;   ///< none while a fraction is no number
+    QString words;               ///< the sum, and what is wrong with the whole
+    QMap<int, QString> rowWords; ///< what is wrong with a row
+    bool isWhole = false;        ///< can stand in the document
 };
 /// `own`: names of the user's own gases, besides those of the model.
 [[nodiscard]] MixtureVerdict verdictOn(const MixtureDraft &draft, const std::vector<GasEntry> &gases,

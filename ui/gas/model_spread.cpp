@@ -50,7 +50,8 @@ RichText temperatureChange(const path::PathResult &before, const path::PathResul
     if (!from || !to) return {};
     const std::array ends{*from, *to};
     const units::Scale unit = units::scaleFor(Quantity::temperature, ends, units);
-    return RichText::marked(QStringLiteral(", <i>T</i><sub>%1</sub> ").arg(now.states.size())) +
+    if (figure(*from, unit) == figure(*to, unit)) return {};
+    return RichText::marked(say(", end <i>T</i> ")) +
            RichText::plain(QStringLiteral("%1 → %2").arg(figure(*from, unit), figureWithUnit(*to, unit)));
 }
 
@@ -59,7 +60,7 @@ RichText temperatureChange(const path::PathResult &before, const path::PathResul
 QString percentOff(double other, double value, double scale)
 {
     if (!(std::abs(value) > 1e-9 * scale) || !std::isfinite(other)) return QStringLiteral("–");
-    const double percent = 100.0 * (other - value) / std::abs(value);
+    const double percent = 100.0 * (other / value - 1.0);
     if (std::abs(percent) >= 1e4) return QStringLiteral("–");
     return withSign(percent, std::abs(percent) < 9.95 ? 1 : 0) + QChar(0x202F) + QLatin1Char('%');
 }
@@ -83,9 +84,10 @@ RichText modelChangeWords(const Snapshot &before, const Snapshot &now)
     const path::PathResult &was = before.evaluation->path;
     const path::PathResult &is = now.evaluation->path;
     if (is.segments.empty()) return lead + RichText::plain(say("the path has no segments yet."));
-    const double scale = std::max({std::abs(was.totals.work), std::abs(was.totals.heat), std::abs(is.totals.work),
-                                   std::abs(is.totals.heat)});
-    return lead + energyChange("W", was.totals.work, is.totals.work, scale, now.units) + RichText::plain(QStringLiteral(", ")) +
+    const double scale = std::max(
+        {std::abs(was.totals.work), std::abs(was.totals.heat), std::abs(is.totals.work), std::abs(is.totals.heat)});
+    return lead + energyChange("W", was.totals.work, is.totals.work, scale, now.units) +
+           RichText::plain(QStringLiteral(", ")) +
            energyChange("Q", was.totals.heat, is.totals.heat, scale, now.units) +
            temperatureChange(was, is, now.units) + RichText::plain(QStringLiteral("."));
 }

@@ -7,7 +7,8 @@
 namespace quasistat::ui
 {
 
-/// Difference of `other` from `value` in percent of `value`: "+1.3 %"; "–" where `value` is nothing beside `scale`.
+/// Difference of `other` from `value` in percent of `value`, larger of either sign +: "+1.3 %"; "–" where `value` is
+/// nothing beside `scale`.
 [[nodiscard]] QString percentOff(double other, double value, double scale);
 /// Difference of two temperatures [K], with its sign, in K or °F: "+3.2 K".
 [[nodiscard]] QString degreesOff(double other, double value, const units::DisplayUnits &units);

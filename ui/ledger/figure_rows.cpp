@@ -158,9 +158,11 @@ void addIdealGas(FigureList &list, const SegmentResult &result, const units::Dis
         const QString text = say("as an ideal gas: %1").arg(symbol);
         return off == QStringLiteral("–") || off.isEmpty() ? text : QStringLiteral("%1 (%2)").arg(text, off);
     };
-    list.add("ideal_gas_work", words(QStringLiteral("<i>W</i>"), percentOff(ideal.work, result.work, result.audit.scale)),
+    list.add("ideal_gas_work",
+             words(QStringLiteral("<i>W</i>"), percentOff(ideal.work, result.work, result.audit.scale)),
              sign * ideal.work, Quantity::energy);
-    list.add("ideal_gas_heat", words(QStringLiteral("<i>Q</i>"), percentOff(ideal.heat, result.heat, result.audit.scale)),
+    list.add("ideal_gas_heat",
+             words(QStringLiteral("<i>Q</i>"), percentOff(ideal.heat, result.heat, result.audit.scale)),
              sign * ideal.heat, Quantity::energy);
     const auto end = result.to.temperature();
     list.add("ideal_gas_end_temperature",

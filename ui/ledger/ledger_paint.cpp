@@ -139,19 +139,21 @@ void LedgerView::paintAccountRow(QPainter &painter, const LedgerRow &row, const 
 
 void LedgerView::paintSpreadRow(QPainter &painter, const LedgerRow &row, const QRectF &place)
 {
-    painter.setPen(m_look.secondary());
-    drawText(painter, {margin, place.top() + 18}, row.lead, labelFace());
     const double left = titleLeft(row);
+    const double titleY = place.top() + 18;
+    const double figuresY = isTitleAbove(row) ? place.top() + 36 : titleY;
+    const double remarksY = figuresY + 17;
+    painter.setPen(m_look.secondary());
+    drawText(painter, {margin, titleY}, row.lead, labelFace());
     painter.setPen(m_look.ink);
-    drawFitted(painter, {left, place.top() + 18}, row.label, bodyFace(), width() - margin - left);
+    drawFitted(painter, {left, titleY}, row.label, bodyFace(), width() - margin - left);
     for (int column = 0; column < row.figures.size(); ++column) {
         painter.setPen(m_look.ink);
-        drawText(painter, {columnRight(column), place.top() + 36}, row.figures[column], bodyFace(), Align::right);
+        drawText(painter, {columnRight(column), figuresY}, row.figures[column], bodyFace(), Align::right);
         painter.setPen(m_look.secondary());
-        drawText(painter, {columnRight(column), place.top() + 53}, row.remarks.value(column), labelFace(),
-                 Align::right);
+        drawText(painter, {columnRight(column), remarksY}, row.remarks.value(column), labelFace(), Align::right);
     }
-    if (!row.remarks.isEmpty()) drawText(painter, {left, place.top() + 53}, tr("off by"), labelFace());
+    if (!row.remarks.isEmpty()) drawText(painter, {left, remarksY}, tr("off by"), labelFace());
     drawRule(painter, place.bottom() - 0.5, margin, width() - margin, faded(m_look.ink, 0.1));
 }
 
@@ -223,7 +225,10 @@ void LedgerView::paintTextRow(QPainter &painter, const LedgerRow &row, const QRe
     double left = margin;
     if (warning || !row.lead.isEmpty()) left += 22;
     if (warning) drawMark(painter, StateMark::warning, {margin + 6, place.top() + 11}, m_look.warning, m_look.panel);
-    painter.setPen(fault ? m_look.error : faded(m_look.ink, row.strong ? 1.0 : warning || !row.lead.isEmpty() ? 0.85 : 0.66));
+    painter.setPen(fault ? m_look.error
+                         : faded(m_look.ink, row.strong                       ? 1.0
+                                             : warning || !row.lead.isEmpty() ? 0.85
+                                                                              : 0.66));
     const QString text = row.label.unstyled();
     const double wide = width() - margin - left;
     if (textWidth(row.label, labelFace()) <= wide)

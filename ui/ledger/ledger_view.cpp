@@ -74,7 +74,7 @@ int LedgerView::heightOf(const LedgerRow &row) const
     case LedgerRowKind::heading: return 40;
     case LedgerRowKind::columns: return 22;
     case LedgerRowKind::segment: return isTitleAbove(row) ? 46 : 30;
-    case LedgerRowKind::spread: return 64;
+    case LedgerRowKind::spread: return isTitleAbove(row) ? 64 : 48;
     case LedgerRowKind::total: return 32;
     case LedgerRowKind::formula: return 30;
     case LedgerRowKind::route: return row.opened ? 18 : 24;

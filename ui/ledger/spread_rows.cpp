@@ -51,8 +51,8 @@ QString summary(const path::PathResult &path)
 {
     const Worst worst = worstOf(path);
     if (worst.percent < 0.05) return say("An ideal gas would give the same to 0.1 % on every segment.");
-    const QString percent = QString::number(worst.percent, 'f', worst.percent < 9.95 ? 1 : 0) + QChar(0x202F) +
-                            QLatin1Char('%');
+    const QString percent =
+        QString::number(worst.percent, 'f', worst.percent < 9.95 ? 1 : 0) + QChar(0x202F) + QLatin1Char('%');
     return say("An ideal gas would be off by up to %1 of work or heat, on segment %2.")
         .arg(percent)
         .arg(worst.segment + 1);
@@ -75,8 +75,9 @@ LedgerRow spreadRow(const SegmentResult &segment, int index, const units::Scale 
     row.figures = {figure(sign * ideal.work, energy), figure(sign * ideal.heat, energy),
                    figure(ideal.endTemperature, temperature)};
     row.remarks = {percentOff(ideal.work, segment.work, scale), percentOff(ideal.heat, segment.heat, scale),
-                   segment.to.temperature() ? degreesOff(ideal.endTemperature, *segment.to.temperature(), snapshot.units)
-                                            : QString()};
+                   segment.to.temperature()
+                       ? degreesOff(ideal.endTemperature, *segment.to.temperature(), snapshot.units)
+                       : QString()};
     return row;
 }
 

@@ -24,7 +24,7 @@ using Section = std::vector<Block> (*)(const ReportContent &);
 [[nodiscard]] std::vector<Block> statesSection(const ReportContent &content);
 [[nodiscard]] std::vector<Block> ledgerSection(const ReportContent &content);
 [[nodiscard]] std::vector<Block> limitsReachedSection(const ReportContent &content); ///< reversible limits and rod work
-[[nodiscard]] std::vector<Block> spreadSection(const ReportContent &content); ///< nothing where the gas is ideal
+[[nodiscard]] std::vector<Block> spreadSection(const ReportContent &content);        ///< nothing where the gas is ideal
 [[nodiscard]] std::vector<Block> pathFiguresSection(const ReportContent &content);
 [[nodiscard]] std::vector<Block> envelopeSection(const ReportContent &content);
 [[nodiscard]] std::vector<Block> warningsSection(const ReportContent &content);
@@ -35,9 +35,9 @@ using Section = std::vector<Block> (*)(const ReportContent &);
 
 /// In the order of the report.
 inline constexpr Section reportSections[]{
-    titleBlock,    basis,              diagramSection,       statesSection, ledgerSection, envelopeSection,
-    spreadSection, cautionSection,     pathFiguresSection,   limitsReachedSection, auditSection, notesSection,
-    warningsSection, assumptionsSection, modelSection};
+    titleBlock,      basis,         diagramSection,  statesSection,      ledgerSection,
+    envelopeSection, spreadSection, cautionSection,  pathFiguresSection, limitsReachedSection,
+    auditSection,    notesSection,  warningsSection, assumptionsSection, modelSection};
 
 /// Value of a key of the document's title block, or empty: "number".
 [[nodiscard]] QString documentField(const document::Design &design, const char *key);

@@ -1,7 +1,7 @@
 // The title block and the line of what everything rests on.
 
-#include "ui/gas/gas_words.h"
 #include "ui/canvas/limit_text.h"
+#include "ui/gas/gas_words.h"
 #include "ui/report/print_type.h"
 #include "ui/report/sections.h"
 #include "ui/session/design_reading.h"

@@ -65,8 +65,8 @@ double entropyChange(const gas::State &from, const gas::State &to)
 {
     constexpr double rounding = 1e-10; // what a solver for an isentrope leaves, with room
     const double change = to.entropy() - from.entropy();
-    const double scale = std::max({std::abs(from.entropy()), std::abs(to.entropy()),
-                                   to.amount() * to.gas().gasConstant()});
+    const double scale =
+        std::max({std::abs(from.entropy()), std::abs(to.entropy()), to.amount() * to.gas().gasConstant()});
     return std::abs(change) <= rounding * scale ? 0.0 : change;
 }
 

@@ -22,9 +22,8 @@ struct HeaderText {
 
 /// The design after `text` was entered in `field`.
 [[nodiscard]] document::Design headerEntered(const document::Design &design, const FormField &field,
-                                       const QString &text);
-[[nodiscard]] document::Design headerChosen(const Snapshot &snapshot, const FormField &field,
-                                            const std::string &key);
+                                             const QString &text);
+[[nodiscard]] document::Design headerChosen(const Snapshot &snapshot, const FormField &field, const std::string &key);
 /// Turns the display of work and heat to "by the gas" and back.
 [[nodiscard]] document::Design signTurned(const Snapshot &snapshot);
 
