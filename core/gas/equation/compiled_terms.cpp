@@ -4,6 +4,7 @@
 
 #include <algorithm>
 #include <cassert>
+#include <tuple>
 
 namespace quasistat::gas
 {
@@ -37,9 +38,10 @@ std::vector<Entry> gathered(const ResidualTerms &terms, CompiledTerms &made)
 {
     std::vector<Entry> entries;
     const auto gather = [&](double n, int d, double t, const DensityFactor &inDelta, const TemperatureFactor &inTau) {
-        entries.push_back({placeOf(inDelta, made.densityFactors),
-                           d,
-                           {n, t, made.powers.place(t), placeOf(inTau, made.temperatureFactors)}});
+        entries.push_back(
+            {placeOf(inDelta, made.densityFactors),
+             d,
+             {n, n * t, n * t * (t - 1.0), t, made.powers.place(t), placeOf(inTau, made.temperatureFactors)}});
         made.highestDensityPower = std::max({made.highestDensityPower, d, inDelta.l});
     };
     using D = DensityFactor::Form;
@@ -62,6 +64,25 @@ std::vector<Entry> gathered(const ResidualTerms &terms, CompiledTerms &made)
     return entries;
 }
 
+/// Adds the terms of one density factor as a group. `entries` are sorted by it.
+void addGroups(const std::vector<Entry> &entries, CompiledTerms &made)
+{
+    for (const Entry &entry : entries) {
+        if (made.groups.empty() || made.groups.back().factor != entry.densityFactor)
+            made.groups.push_back({entry.densityFactor, made.wholeTerms.size(), made.wholeTerms.size(),
+                                   made.factoredTerms.size(), made.factoredTerms.size()});
+        const auto &[n, nt, ntt, t, power, factor] = entry.term;
+        const double d = entry.d;
+        const auto densityPower = static_cast<std::size_t>(entry.d);
+        if (factor == 0)
+            made.wholeTerms.push_back({n, n * d, n * d * (d - 1.0), nt, nt * d, ntt, power, densityPower});
+        else
+            made.factoredTerms.push_back({n, t, d, power, densityPower, factor});
+        made.groups.back().endWhole = made.wholeTerms.size();
+        made.groups.back().endFactored = made.factoredTerms.size();
+    }
+}
+
 } // namespace
 
 CompiledTerms compiled(const ResidualTerms &published)
@@ -72,13 +93,16 @@ CompiledTerms compiled(const ResidualTerms &published)
     made.nonAnalytic = published.nonAnalytic;
     std::vector<Entry> entries = gathered(published, made);
     std::stable_sort(entries.begin(), entries.end(), [](const Entry &a, const Entry &b) {
-        return std::pair(a.densityFactor, a.d) < std::pair(b.densityFactor, b.d);
+        return std::tuple(a.densityFactor, a.d, a.term.factor != 0) <
+               std::tuple(b.densityFactor, b.d, b.term.factor != 0);
     });
+    addGroups(entries, made);
     for (const Entry &entry : entries) {
         if (made.columns.empty() || made.columns.back().factor != entry.densityFactor ||
             made.columns.back().d != entry.d)
-            made.columns.push_back({entry.densityFactor, entry.d, made.terms.size(), 0});
+            made.columns.push_back({entry.densityFactor, entry.d, made.terms.size(), made.terms.size(), 0});
         made.terms.push_back(entry.term);
+        if (entry.term.factor == 0) made.columns.back().endPlainTerm = made.terms.size();
         made.columns.back().endTerm = made.terms.size();
     }
     assert(static_cast<std::size_t>(made.highestDensityPower) < CompiledTerms::mostDensityPowers);

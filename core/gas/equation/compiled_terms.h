@@ -35,19 +35,50 @@ struct CompiledTerms {
         double b = 0.0;
         bool operator==(const TemperatureFactor &) const = default;
     };
-    /// f(δ) = δᵈ times a density factor; its terms end where the next column's begin.
+    /// f(δ) = δᵈ times a density factor. Its terms: plain ones, then those with a temperature factor.
     struct Column {
         std::size_t factor;
         int d;
         std::size_t firstTerm;
+        std::size_t endPlainTerm;
         std::size_t endTerm;
     };
-    /// n τᵗ times a temperature factor.
+    /// n τᵗ times a temperature factor, with what its derivatives take.
     struct Term {
         double n;
+        double nt;  ///< n t
+        double ntt; ///< n t (t − 1)
         double t;
         std::size_t power;
         std::size_t factor;
+    };
+
+    /// The same terms once more, for all derivatives of one state: gathered by density factor, with the products that
+    /// derivatives of δᵈ τᵗ take.
+    struct WholeTerm {
+        double n;
+        double nd;  ///< n d
+        double ndd; ///< n d (d − 1)
+        double nt;  ///< n t
+        double ntd; ///< n t d
+        double ntt; ///< n t (t − 1)
+        std::size_t power;
+        std::size_t d;
+    };
+    struct FactoredTerm {
+        double n;
+        double t;
+        double d;
+        std::size_t power;
+        std::size_t densityPower;
+        std::size_t factor;
+    };
+    struct Group {
+        std::size_t factor; ///< in δ
+        std::size_t firstWhole;
+        std::size_t endWhole;
+        std::size_t firstFactored; ///< those with a temperature factor
+        std::size_t endFactored;
     };
 
     double reducingTemperature = 0.0; ///< [K]
@@ -58,6 +89,9 @@ struct CompiledTerms {
     std::vector<TemperatureFactor> temperatureFactors{1};
     std::vector<Column> columns;
     std::vector<Term> terms;
+    std::vector<Group> groups;
+    std::vector<WholeTerm> wholeTerms;
+    std::vector<FactoredTerm> factoredTerms;
     std::vector<NonAnalyticTerm> nonAnalytic; ///< as published: no product of the two
 };
 

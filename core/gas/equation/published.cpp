@@ -9,35 +9,42 @@ namespace quasistat::gas
 namespace
 {
 
-/// A term's logarithmic derivatives: first = x ∂ln φ/∂x, slope = x ∂first/∂x.
+/// A term's logarithmic derivative x ∂ln φ/∂x, its power apart from the rest, and the rest's own slope x ∂rest/∂x.
 struct Logarithmic {
-    double first;
+    double power;
+    double rest;
     double slope;
-    [[nodiscard]] double second() const { return first * (first - 1.0) + slope; } ///< x² φ_xx/φ
+    [[nodiscard]] double first() const { return power + rest; }
+    /// x² φ_xx/φ = first (first − 1) + slope, multiplied out: in a thin gas the rest is small beside 1.
+    [[nodiscard]] double second() const
+    {
+        return power * (power - 1.0) + rest * (2.0 * power - 1.0) + rest * rest + slope;
+    }
 };
 
 Alpha termOf(double value, Logarithmic inTau, Logarithmic inDelta)
 {
     return {.a00 = value,
-            .a10 = value * inTau.first,
-            .a01 = value * inDelta.first,
+            .a10 = value * inTau.first(),
+            .a01 = value * inDelta.first(),
             .a20 = value * inTau.second(),
-            .a11 = value * inTau.first * inDelta.first,
+            .a11 = value * inTau.first() * inDelta.first(),
             .a02 = value * inDelta.second()};
 }
 
 Alpha valueOf(const PowerTerm &k, double tau, double delta)
 {
     const double power = k.n * std::pow(delta, k.d) * std::pow(tau, k.t);
-    if (k.l == 0) return termOf(power, {k.t, 0.0}, {static_cast<double>(k.d), 0.0});
+    const double d = k.d;
+    if (k.l == 0) return termOf(power, {k.t, 0.0, 0.0}, {d, 0.0, 0.0});
     const double u = k.g * std::pow(delta, k.l);
-    return termOf(power * std::exp(-u), {k.t, 0.0}, {k.d - k.l * u, -k.l * k.l * u});
+    return termOf(power * std::exp(-u), {k.t, 0.0, 0.0}, {d, -k.l * u, -k.l * k.l * u});
 }
 
-/// Of exp(−c (x − x₀)²): −2c x(x − x₀) and its slope.
-Logarithmic bell(double c, double x0, double x)
+/// Of x to a power times exp(−c (x − x₀)²).
+Logarithmic bell(double power, double c, double x0, double x)
 {
-    return {-2.0 * c * x * (x - x0), -2.0 * c * x * (2.0 * x - x0)};
+    return {power, -2.0 * c * x * (x - x0), -2.0 * c * x * (2.0 * x - x0)};
 }
 
 Alpha valueOf(const GaussianTerm &k, double tau, double delta)
@@ -46,15 +53,15 @@ Alpha valueOf(const GaussianTerm &k, double tau, double delta)
                          std::exp(-k.eta * std::pow(delta - k.epsilon, 2) - k.beta * std::pow(tau - k.gamma, 2));
     const Logarithmic inTau = bell(k.beta, k.gamma, tau);
     const Logarithmic inDelta = bell(k.eta, k.epsilon, delta);
-    return termOf(value, {k.t + inTau.first, inTau.slope}, {k.d + inDelta.first, inDelta.slope});
+    return termOf(value, {k.t + inTau.first(), inTau.slope}, {k.d + inDelta.first(), inDelta.slope});
 }
 
 Alpha valueOf(const DepartureTerm &k, double tau, double delta)
 {
     const double value = k.n * std::pow(delta, k.d) * std::pow(tau, k.t) *
                          std::exp(-k.eta * std::pow(delta - k.epsilon, 2) - k.beta * (delta - k.gamma));
-    const Logarithmic inDelta = bell(k.eta, k.epsilon, delta);
-    return termOf(value, {k.t, 0.0}, {k.d + inDelta.first - k.beta * delta, inDelta.slope - k.beta * delta});
+    const Logarithmic own = bell(k.d, k.eta, k.epsilon, delta);
+    return termOf(value, {k.t, 0.0, 0.0}, {own.power, own.rest - k.beta * delta, own.slope - k.beta * delta});
 }
 
 Alpha valueOf(const AssociatingTerm &k, double tau, double delta)
@@ -67,7 +74,7 @@ Alpha valueOf(const AssociatingTerm &k, double tau, double delta)
     const double first = -2.0 * k.beta * x * w * w;
     const double second = (8.0 * k.beta * k.beta * x * x * w - 2.0 * k.beta) * w * w;
     const Logarithmic inDelta = bell(-k.eta, k.epsilon, delta);
-    return termOf(value, {k.t + tau * first, tau * first + tau * tau * second}, {k.d + inDelta.first, inDelta.slope});
+    return termOf(value, {k.t + tau * first, tau * first + tau * tau * second}, {k.d + inDelta.first(), inDelta.slope});
 }
 
 } // namespace

@@ -1,6 +1,7 @@
 #include "core/gas/ideal/helmholtz_ideal.h"
 
 #include "core/gas/constants.h"
+#include "core/gas/equation/kernel/kernels.h"
 
 #include <cmath>
 
@@ -12,7 +13,8 @@ namespace
 class HelmholtzIdeal final : public IdealFunction
 {
 public:
-    explicit HelmholtzIdeal(const IdealTerms &terms) : m_terms(terms)
+    explicit HelmholtzIdeal(const IdealTerms &terms)
+        : m_reducingTemperature(terms.reducingTemperature), m_terms(compiled(terms)), m_kernels(kernels())
     {
         const IdealProperties zero = at(referenceTemperature);
         m_enthalpyShift = zero.enthalpy;
@@ -21,37 +23,20 @@ public:
 
     IdealProperties at(double temperature) const override
     {
-        const double tau = m_terms.reducingTemperature / temperature;
-        const double lnTau = std::log(tau);
-        // α⁰ without ln δ, τ α⁰_τ and τ² α⁰_ττ
-        double a = m_terms.lead[0] + m_terms.lead[1] * tau + m_terms.logTau * lnTau;
-        double first = m_terms.lead[1] * tau + m_terms.logTau;
-        double second = -m_terms.logTau;
-        for (const IdealPowerTerm &term : m_terms.powers) {
-            const double value = term.n * std::exp(term.t * lnTau);
-            a += value;
-            first += term.t * value;
-            second += term.t * (term.t - 1.0) * value;
-        }
-        for (const PlanckEinsteinTerm &term : m_terms.planckEinstein) {
-            const double x = term.theta * tau;
-            const double e = term.d * std::exp(-x);
-            const double sum = term.c + e;
-            const double ratio = e / sum;
-            a += term.n * std::log(sum);
-            first -= term.n * x * ratio;
-            second += term.n * x * x * ratio * (1.0 - ratio);
-        }
+        const double tau = m_reducingTemperature / temperature;
+        const IdealSums sums = m_kernels.idealAt(m_terms, tau);
         // At constant pressure ln δ brings ln T = ln T_r − ln τ; what else is constant the shift takes away.
-        return {.heatCapacity = 1.0 - second,
-                .enthalpy = temperature * (1.0 + first) - m_enthalpyShift,
-                .entropy = first - a - lnTau - m_entropyShift};
+        return {.heatCapacity = 1.0 - sums.a20,
+                .enthalpy = temperature * (1.0 + sums.a10) - m_enthalpyShift,
+                .entropy = sums.a10 - sums.a00 - sums.lnTau - m_entropyShift};
     }
 
     std::span<const double> seams() const override { return {}; }
 
 private:
-    IdealTerms m_terms;
+    double m_reducingTemperature;
+    CompiledIdeal m_terms;
+    Kernels m_kernels;
     double m_enthalpyShift = 0.0;
     double m_entropyShift = 0.0;
 };

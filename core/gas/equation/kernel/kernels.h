@@ -2,6 +2,7 @@
 // The innermost loops, compiled for any x86-64 and again for processors with wider vectors; the program takes the best
 // its processor has. Results differ between families in the last bits only, and never between runs on one machine.
 
+#include "core/gas/equation/compiled_ideal.h"
 #include "core/gas/equation/compiled_terms.h"
 #include "core/gas/equation/residual.h"
 
@@ -20,6 +21,7 @@ struct Kernels {
     DensityDerivatives (*densityDerivatives)(const CompiledTerms &, const Isotherm &, double density);
     void (*atEach)(const CompiledTerms &, std::span<const double> temperatures, std::span<const double> densities,
                    std::span<Alpha> results);
+    IdealSums (*idealAt)(const CompiledIdeal &, double tau);
 };
 
 /// Those of the best family that this processor has.

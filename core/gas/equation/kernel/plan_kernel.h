@@ -1,23 +1,37 @@
 // Evaluation of compiled terms. Included by kernels.cpp once per processor family, like lanes.h.
 
+/// τᵗ = exp(t ln τ): eight exponents side by side for one state, one exponent for eight states.
+[[gnu::always_inline]] inline void evaluateExponentials(const PowerChain &chain, double lnTau, double *powers)
+{
+    const std::vector<std::size_t> &places = chain.exponentials();
+    const std::vector<double> &exponents = chain.exponentialExponents();
+    for (std::size_t from = 0; from < places.size(); from += 8) {
+        Eight block;
+        std::memcpy(&block, exponents.data() + from, sizeof block);
+        const Eight values = exponential(block * lnTau);
+        const std::size_t count = std::min<std::size_t>(8, places.size() - from);
+        for (std::size_t i = 0; i < count; ++i) powers[places[from + i]] = values[i];
+    }
+}
+[[gnu::always_inline]] inline void evaluateExponentials(const PowerChain &chain, const Eight &lnTau, Eight *powers)
+{
+    const std::vector<std::size_t> &places = chain.exponentials();
+    for (std::size_t i = 0; i < places.size(); ++i)
+        powers[places[i]] = exponential(chain.exponentialExponents()[i] * lnTau);
+}
+
 /// Every power of τ that the equation needs.
 template <class Lanes>
 [[gnu::always_inline]] inline void evaluatePowers(const PowerChain &chain, const Lanes &tau, Lanes *powers)
 {
-    Lanes lnTau{};
-    if (chain.needsLogarithm()) lnTau = logarithm(tau);
     powers[0] = Lanes{} + 1.0;
     powers[1] = tau;
-    for (std::size_t i = 2; i < chain.steps().size(); ++i) {
-        const PowerChain::Step &step = chain.steps()[i];
-        switch (step.operation) {
-        case PowerChain::Operation::given: break;
-        case PowerChain::Operation::product: powers[i] = powers[step.a] * powers[step.b]; break;
-        case PowerChain::Operation::root: powers[i] = squareRoot(powers[step.a]); break;
-        case PowerChain::Operation::reciprocal: powers[i] = 1.0 / powers[step.a]; break;
-        case PowerChain::Operation::exponential: powers[i] = exponential(step.exponent * lnTau); break;
-        }
-    }
+    if (!chain.exponentials().empty()) evaluateExponentials(chain, logarithm(tau), powers);
+    for (const PowerChain::OfOne &root : chain.roots()) powers[root.place] = squareRoot(powers[root.a]);
+    for (const PowerChain::Product &product : chain.products())
+        powers[product.place] = powers[product.a] * powers[product.b];
+    for (const PowerChain::OfOne &reciprocal : chain.reciprocals())
+        powers[reciprocal.place] = 1.0 / powers[reciprocal.a];
 }
 
 /// A temperature factor with its logarithmic derivatives: first = τ ∂ln g/∂τ, slope = τ ∂first/∂τ.
@@ -74,17 +88,16 @@ template <class Lanes>
 [[gnu::always_inline]] inline void columnFactors(const CompiledTerms &terms, const CompiledTerms::Column &column,
                                                  const TemperatureParts<Lanes> &parts, Lanes &a, Lanes &b, Lanes &c)
 {
-    for (std::size_t i = column.firstTerm; i < column.endTerm; ++i) {
+    for (std::size_t i = column.firstTerm; i < column.endPlainTerm; ++i) {
         const CompiledTerms::Term &term = terms.terms[i];
-        const Lanes power = term.n * parts.powers[term.power];
-        if (term.factor == 0) {
-            const Lanes once = term.t * power;
-            a += power;
-            b += once;
-            c += (term.t - 1.0) * once;
-            continue;
-        }
-        const Lanes value = power * parts.value[term.factor];
+        const Lanes power = parts.powers[term.power];
+        a += term.n * power;
+        b += term.nt * power;
+        c += term.ntt * power;
+    }
+    for (std::size_t i = column.endPlainTerm; i < column.endTerm; ++i) {
+        const CompiledTerms::Term &term = terms.terms[i];
+        const Lanes value = term.n * parts.powers[term.power] * parts.value[term.factor];
         const Lanes first = term.t + parts.first[term.factor];
         a += value;
         b += value * first;
@@ -117,6 +130,38 @@ template <class Lanes>
     }
 }
 
+/// Sums over the terms of one density factor, without it: Σ v, Σ d v, Σ d(d − 1) v, and with t for each order in τ.
+template <class Lanes>
+[[gnu::always_inline]] inline Sums<Lanes> groupSums(const CompiledTerms &terms, const CompiledTerms::Group &group,
+                                                    const TemperatureParts<Lanes> &parts, const Factors<Lanes> &factors)
+{
+    Sums<Lanes> sums;
+    for (std::size_t i = group.firstWhole; i < group.endWhole; ++i) {
+        const CompiledTerms::WholeTerm &term = terms.wholeTerms[i];
+        const Lanes power = parts.powers[term.power] * factors.powers[term.d];
+        sums.a00 += term.n * power;
+        sums.a01 += term.nd * power;
+        sums.a02 += term.ndd * power;
+        sums.a10 += term.nt * power;
+        sums.a11 += term.ntd * power;
+        sums.a20 += term.ntt * power;
+    }
+    for (std::size_t i = group.firstFactored; i < group.endFactored; ++i) {
+        const CompiledTerms::FactoredTerm &term = terms.factoredTerms[i];
+        const Lanes value =
+            term.n * parts.powers[term.power] * factors.powers[term.densityPower] * parts.value[term.factor];
+        const Lanes first = term.t + parts.first[term.factor];
+        const Lanes once = value * first;
+        sums.a00 += value;
+        sums.a01 += term.d * value;
+        sums.a02 += term.d * (term.d - 1.0) * value;
+        sums.a10 += once;
+        sums.a11 += term.d * once;
+        sums.a20 += value * (first * (first - 1.0) + parts.slope[term.factor]);
+    }
+    return sums;
+}
+
 template <class Lanes>
 [[gnu::always_inline]] inline void evaluate(const CompiledTerms &terms, const Lanes &tau, const Lanes &delta,
                                             Sums<Lanes> &sums)
@@ -125,21 +170,18 @@ template <class Lanes>
     evaluateTemperature(terms, tau, parts);
     Factors<Lanes> factors;
     evaluateDensity(terms, delta, factors);
-    for (std::size_t j = 0; j < terms.columns.size(); ++j) {
-        Lanes a{};
-        Lanes b{};
-        Lanes c{};
-        columnFactors(terms, terms.columns[j], parts, a, b, c);
-        const CompiledTerms::Column &column = terms.columns[j];
-        const Lanes f = factors.powers[column.d] * factors.value[column.factor];
-        const Lanes first = static_cast<double>(column.d) + factors.first[column.factor];
-        const Lanes fFirst = f * first;
-        sums.a00 += a * f;
-        sums.a10 += b * f;
-        sums.a20 += c * f;
-        sums.a01 += a * fFirst;
-        sums.a11 += b * fFirst;
-        sums.a02 += a * f * (first * (first - 1.0) + factors.slope[column.factor]);
+    for (const CompiledTerms::Group &group : terms.groups) {
+        const Sums<Lanes> own = groupSums(terms, group, parts, factors);
+        // The product rule with the factor's logarithmic derivatives.
+        const Lanes value = factors.value[group.factor];
+        const Lanes first = factors.first[group.factor];
+        const Lanes second = first * (first - 1.0) + factors.slope[group.factor];
+        sums.a00 += value * own.a00;
+        sums.a10 += value * own.a10;
+        sums.a20 += value * own.a20;
+        sums.a01 += value * (own.a01 + first * own.a00);
+        sums.a11 += value * (own.a11 + first * own.a10);
+        sums.a02 += value * (own.a02 + 2.0 * first * own.a01 + second * own.a00);
     }
 }
 
@@ -240,4 +282,59 @@ inline void atEach(const CompiledTerms &terms, std::span<const double> temperatu
             addNonAnalytic(terms, tau[i], delta[i], results[from + i]);
         }
     }
+}
+
+/// The sums of an ideal part at τ: α⁰ without ln δ and its scaled derivatives.
+inline IdealSums idealAt(const CompiledIdeal &ideal, double tau)
+{
+    const double lnTau = std::log(tau);
+    const double inverse = 1.0 / tau;
+    IdealSums sums{ideal.lead[0] + ideal.lead[1] * tau + ideal.logTau * lnTau, ideal.lead[1] * tau + ideal.logTau,
+                   -ideal.logTau, lnTau};
+    for (const CompiledIdeal::WholePower &term : ideal.wholePowers) {
+        const double factor = term.t > 0 ? tau : inverse;
+        double value = term.n;
+        for (int i = 0; i < std::abs(term.t); ++i) value *= factor;
+        sums.a00 += value;
+        sums.a10 += term.t * value;
+        sums.a20 += term.t * (term.t - 1) * value;
+    }
+    for (const IdealPowerTerm &term : ideal.powers) {
+        const double value = term.n * exponential(term.t * lnTau);
+        sums.a00 += value;
+        sums.a10 += term.t * value;
+        sums.a20 += term.t * (term.t - 1.0) * value;
+    }
+    for (const PlanckEinsteinTerm &term : ideal.few) {
+        const double x = term.theta * tau;
+        const double e = term.d * exponential(-x);
+        const double sum = term.c + e;
+        const double ratio = e / sum;
+        sums.a00 += term.n * std::log(sum);
+        sums.a10 -= term.n * x * ratio;
+        sums.a20 += term.n * x * x * ratio * (1.0 - ratio);
+    }
+    for (std::size_t from = 0; from < ideal.n.size(); from += 8) {
+        Eight n;
+        Eight theta;
+        Eight c;
+        Eight d;
+        std::memcpy(&n, ideal.n.data() + from, sizeof n);
+        std::memcpy(&theta, ideal.theta.data() + from, sizeof theta);
+        std::memcpy(&c, ideal.c.data() + from, sizeof c);
+        std::memcpy(&d, ideal.d.data() + from, sizeof d);
+        const Eight x = theta * tau;
+        const Eight e = d * exponential(-x);
+        const Eight sum = c + e;
+        const Eight ratio = e / sum;
+        const Eight a = n * logarithm(sum);
+        const Eight first = n * x * ratio;
+        const Eight second = first * x * (1.0 - ratio);
+        for (int i = 0; i < 8; ++i) {
+            sums.a00 += a[i];
+            sums.a10 -= first[i];
+            sums.a20 += second[i];
+        }
+    }
+    return sums;
 }
