@@ -21,6 +21,8 @@ constexpr int fewestNodes = 16;
 constexpr int mostNodes = 400;
 /// A curve that comes this near the boundary (relative to T) between two nodes may touch it there.
 constexpr double nearBoundary = 0.05;
+/// Closer than this the interpolated boundary does not tell the side.
+constexpr double interpolation = 6e-4;
 /// Stands for the distance of a state under the boundary that the gas does not compute.
 constexpr double condensed = -1e-3;
 
@@ -66,8 +68,9 @@ private:
         if (!point) return std::nullopt;
         const double T = point->state.temperature;
         const double v = point->state.molarVolume;
-        const double boundary = exact ? m_boundary.temperatureAt(v) : m_boundary.temperatureNear(v);
+        double boundary = m_boundary.temperatureNear(v);
         if (!(boundary > 0.0)) return 1.0; // the isochore meets none
+        if (exact || std::abs(T / boundary - 1.0) < interpolation) boundary = m_boundary.temperatureAt(v);
         return std::log(T / boundary);
     }
 

@@ -29,7 +29,18 @@ TEST_P(EndsOfEveryLaw, AgreeWithEachOther)
             const bool isochoric = std::holds_alternative<Isochoric>(process);
             const PathOf first{
                 .gas = gas,
+                .start = {.pressure = gas->isIdeal() ? 1e5 : 1e6,
+                          .temperature = gas->isIdeal() ? 300.0 : 400.0,
+                          .amount = 1.0},
                 .segments = {segment(process, isochoric ? EndKey::pressureRatio : EndKey::volumeRatio, change)}};
+            // Not every real gas goes as far on every law: some reach their range, some condense.
+            // Under the dome p and T are tied, and heat and work of a law may meet a value twice.
+            if (!gas->isIdeal()) {
+                const auto result = first.evaluated();
+                if (!result.complete() || !result.segments[0].phaseCrossings.empty() ||
+                    result.states[0].state.compressibility() < 0.5)
+                    continue;
+            }
             const auto r = first.only();
             for (const EndKey key : endChoice(process).keys) {
                 double value = 0.0;
@@ -47,7 +58,7 @@ TEST_P(EndsOfEveryLaw, AgreeWithEachOther)
                 // A polytropic of a gas whose γ crosses n has the same heat both ways; the direction decides.
                 Segment other = segment(process, key, value);
                 other.end.direction = change < 1.0 ? Direction::compress : Direction::expand;
-                const auto again = PathOf{.gas = gas, .segments = {other}}.only();
+                const auto again = PathOf{.gas = gas, .start = first.start, .segments = {other}}.only();
                 EXPECT_NEAR(again.to.pressure() / r.to.pressure(), 1.0, 1e-10);
                 EXPECT_NEAR(again.to.volume() / r.to.volume(), 1.0, 1e-10);
                 EXPECT_NEAR(again.work, r.work, 1e-9 * 2500);

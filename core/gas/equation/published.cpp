@@ -51,9 +51,7 @@ Alpha valueOf(const GaussianTerm &k, double tau, double delta)
 {
     const double value = k.n * std::pow(delta, k.d) * std::pow(tau, k.t) *
                          std::exp(-k.eta * std::pow(delta - k.epsilon, 2) - k.beta * std::pow(tau - k.gamma, 2));
-    const Logarithmic inTau = bell(k.beta, k.gamma, tau);
-    const Logarithmic inDelta = bell(k.eta, k.epsilon, delta);
-    return termOf(value, {k.t + inTau.first(), inTau.slope}, {k.d + inDelta.first(), inDelta.slope});
+    return termOf(value, bell(k.t, k.beta, k.gamma, tau), bell(k.d, k.eta, k.epsilon, delta));
 }
 
 Alpha valueOf(const DepartureTerm &k, double tau, double delta)
@@ -73,8 +71,7 @@ Alpha valueOf(const AssociatingTerm &k, double tau, double delta)
     // w = 1/(βx² + b): dw/dτ = −2βx w², d²w/dτ² = (8β²x² w − 2β) w²
     const double first = -2.0 * k.beta * x * w * w;
     const double second = (8.0 * k.beta * k.beta * x * x * w - 2.0 * k.beta) * w * w;
-    const Logarithmic inDelta = bell(-k.eta, k.epsilon, delta);
-    return termOf(value, {k.t + tau * first, tau * first + tau * tau * second}, {k.d + inDelta.first(), inDelta.slope});
+    return termOf(value, {k.t, tau * first, tau * first + tau * tau * second}, bell(k.d, -k.eta, k.epsilon, delta));
 }
 
 } // namespace

@@ -83,6 +83,19 @@ Place realStart(const Gas &gas, Given first, Given second, const MolarState *gue
     return firstGuess(gas, first, second, guess);
 }
 
+/// Bracketing in T leaves v to the last digits of T, which near a critical point are too few: Newton's last steps in
+/// both.
+std::optional<MolarState> polished(const Gas &gas, Given first, Given second, const std::optional<MolarState> &state)
+{
+    constexpr double same = 1e-6;
+    if (!state || state->vapourFraction) return state;
+    const auto better = newton(gas, first, second, {state->temperature, state->molarVolume});
+    const bool isThere = better && better->dpdv < 0.0 &&
+                         std::abs(better->temperature / state->temperature - 1.0) < same &&
+                         std::abs(better->molarVolume / state->molarVolume - 1.0) < same;
+    return isThere ? better : state;
+}
+
 std::optional<MolarState> realState(const Gas &gas, Given first, Given second, const MolarState *guess)
 {
     const Equation &equation = *gas.equation();
@@ -105,7 +118,7 @@ std::optional<MolarState> realState(const Gas &gas, Given first, Given second, c
     const bool isRight =
         quick && quick->dpdv < 0.0 && insideModel(gas, *quick) && isOnEquilibriumSurface(equation, *quick);
     if (isRight && (guess || !isDenserThanAnyLiquid(equation, *quick))) return quick;
-    return equilibriumState(gas, first, second);
+    return polished(gas, first, second, equilibriumState(gas, first, second));
 }
 
 } // namespace

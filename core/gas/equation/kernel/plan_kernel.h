@@ -219,6 +219,14 @@ inline void atTemperature(const CompiledTerms &terms, double temperature, bool t
     }
 }
 
+/// δ² f″/f of a column, multiplied out: in a thin gas the factor's share is small beside d.
+inline double secondOf(const CompiledTerms::Column &column, const Factors<double> &factors)
+{
+    const double d = column.d;
+    const double rest = factors.first[column.factor];
+    return d * (d - 1.0) + rest * (2.0 * d - 1.0) + (rest * rest + factors.slope[column.factor]);
+}
+
 inline Alpha onIsotherm(const CompiledTerms &terms, const Isotherm &isotherm, double density)
 {
     const double delta = density / terms.reducingDensity;
@@ -234,7 +242,7 @@ inline Alpha onIsotherm(const CompiledTerms &terms, const Isotherm &isotherm, do
         alpha.a20 += isotherm.second[j] * f;
         alpha.a01 += isotherm.value[j] * f * first;
         alpha.a11 += isotherm.first[j] * f * first;
-        alpha.a02 += isotherm.value[j] * f * (first * (first - 1.0) + factors.slope[column.factor]);
+        alpha.a02 += isotherm.value[j] * f * secondOf(column, factors);
     }
     addNonAnalytic(terms, terms.reducingTemperature / isotherm.temperature, delta, alpha);
     return alpha;
@@ -251,7 +259,7 @@ inline DensityDerivatives densityDerivatives(const CompiledTerms &terms, const I
         const double f = isotherm.value[j] * factors.powers[column.d] * factors.value[column.factor];
         const double first = column.d + factors.first[column.factor];
         sum.a01 += f * first;
-        sum.a02 += f * (first * (first - 1.0) + factors.slope[column.factor]);
+        sum.a02 += f * secondOf(column, factors);
     }
     const double tau = terms.reducingTemperature / isotherm.temperature;
     for (const NonAnalyticTerm &term : terms.nonAnalytic) {
