@@ -50,7 +50,7 @@ MolarState homogeneous(const Gas &gas, double temperature, double molarVolume)
 
 } // namespace
 
-std::optional<MolarState> newton(const Gas &gas, Given first, Given second, Place start)
+std::optional<MolarState> newton(const Gas &gas, Given first, Given second, Place start, const MolarState *known)
 {
     auto [temperature, molarVolume] = start;
     const Range &hard = gas.validity().hard;
@@ -58,7 +58,9 @@ std::optional<MolarState> newton(const Gas &gas, Given first, Given second, Plac
     const double smallest = equation ? 1.0 / equation->highestDensity : 0.0;
     const int most = equation ? mostStepsOfRealGas : mostSteps;
     for (int i = 0; i < most; ++i) {
-        const MolarState state = homogeneous(gas, temperature, molarVolume);
+        const bool isKnown = i == 0 && known && !known->vapourFraction && known->temperature == temperature &&
+                             known->molarVolume == molarVolume;
+        const MolarState state = isKnown ? *known : homogeneous(gas, temperature, molarVolume);
         const auto step =
             newtonStep(residue(state, first, gas.gasConstant()), residue(state, second, gas.gasConstant()));
         if (!step || !std::isfinite(step->lnT) || !std::isfinite(step->lnV)) return std::nullopt;

@@ -8,6 +8,7 @@
 #include "core/gas/solve/equilibrium.h"
 #include "core/gas/solve/newton.h"
 
+#include <algorithm>
 #include <cmath>
 
 namespace quasistat::gas
@@ -74,12 +75,49 @@ bool isDenserThanAnyLiquid(const Equation &equation, const MolarState &state)
            equation.boundary->temperatureNear(state.molarVolume) == 0.0;
 }
 
+/// Where the ideal gas of the same equation would be, near enough to begin at: one unknown, as p or v is given.
+std::optional<Place> idealPlace(const Equation &equation, Given first, Given second)
+{
+    const auto p = valueOf(Property::pressure, first, second);
+    const auto v = valueOf(Property::molarVolume, first, second);
+    const double R = equation.gasConstant;
+    if (p && v) return Place{*p * *v / R, *v};
+    if (!p && !v) return std::nullopt;
+    const bool firstIsFixed = first.property == (p ? Property::pressure : Property::molarVolume);
+    const Given other = firstIsFixed ? second : first;
+    constexpr int mostSteps = 12;
+    constexpr double nearEnough = 1e-3;
+    double T = referenceTemperature;
+    for (int i = 0; i < mostSteps; ++i) {
+        const IdealProperties ideal = equation.ideal->at(T);
+        // Heat capacity at constant p or v; u or h with it, s at p or at R T/v.
+        const double capacity = p ? ideal.heatCapacity : ideal.heatCapacity - 1.0;
+        double step = 0.0;
+        if (other.property == Property::entropy) {
+            const double pressure = p ? *p : R * T / *v;
+            const double entropy =
+                R * (ideal.entropy - std::log(pressure / referencePressure)) + equation.mixingEntropy;
+            step = (other.value - entropy) / (R * capacity);
+        } else {
+            const bool isEnthalpy = other.property == Property::enthalpy;
+            const double energy = R * (ideal.enthalpy - (isEnthalpy ? 0.0 : T));
+            step = (other.value - energy) / (R * T * (isEnthalpy ? ideal.heatCapacity : ideal.heatCapacity - 1.0));
+        }
+        T *= std::exp(std::clamp(step, -1.0, 1.0));
+        if (!(std::abs(step) > nearEnough)) break;
+    }
+    if (!std::isfinite(T) || T <= 0.0) return std::nullopt;
+    return Place{T, v ? *v : R * T / *p};
+}
+
 /// The place where the search for a real gas begins: the neighbour, or where the ideal gas would be.
 Place realStart(const Gas &gas, Given first, Given second, const MolarState *guess)
 {
-    if (!guess)
+    if (!guess) {
+        if (const auto place = idealPlace(*gas.equation(), first, second)) return *place;
         if (const auto ideal = idealState(gas.idealPart(), first, second, nullptr))
             return {ideal->temperature, ideal->molarVolume};
+    }
     return firstGuess(gas, first, second, guess);
 }
 
@@ -114,7 +152,7 @@ std::optional<MolarState> realState(const Gas &gas, Given first, Given second, c
     const bool mayMislead = (guess && guess->vapourFraction) ||
                             (T && equation.saturation && *T < equation.saturation->criticalTemperature());
     std::optional<MolarState> quick;
-    if (!mayMislead) quick = newton(gas, first, second, realStart(gas, first, second, guess));
+    if (!mayMislead) quick = newton(gas, first, second, realStart(gas, first, second, guess), guess);
     const bool isRight =
         quick && quick->dpdv < 0.0 && insideModel(gas, *quick) && isOnEquilibriumSurface(equation, *quick);
     if (isRight && (guess || !isDenserThanAnyLiquid(equation, *quick))) return quick;
