@@ -201,6 +201,32 @@ TEST(ModelSpread, ShowsWhatTheIdealGasWouldHaveNeeded)
     EXPECT_GT(std::abs(r.heat / r.idealGas->heat - 1.0), 0.01);
 }
 
+TEST(ReferenceNitrogen, AgreesWithAnIndependentProgramBeyondTheThrottleOfItsExample)
+{
+    // tests/document/examples/nitrogen-reference.expect.json, states 3 to 5, found with a public property library; the
+    // throttle itself is no segment yet: its end is the state of equal enthalpy.
+    constexpr double tolerance = 2e-7; // of the file
+    const gas::GasPtr nitrogen = test::reference("nitrogen");
+    const auto before = gas::stateFrom(*nitrogen, {Property::pressure, 1e7}, {Property::temperature, 365.282615548194});
+    ASSERT_TRUE(before);
+    const auto after = gas::stateFrom(*nitrogen, {Property::pressure, 2e6}, {Property::enthalpy, before->enthalpy});
+    ASSERT_TRUE(after);
+    EXPECT_NEAR(after->temperature, 356.840027489526, tolerance * 356.84);
+    EXPECT_NEAR(10.0 * after->molarVolume, 0.014886601073590314, tolerance * 0.0149);
+    const double tenthOfNRT = 0.1 * 10.0 * 8.31451 * 365.28;
+    EXPECT_NEAR(10.0 * (after->internalEnergy - before->internalEnergy), 1539.1645615016023, tolerance * tenthOfNRT);
+    EXPECT_NEAR(10.0 * (after->entropy - before->entropy), 135.4485310253899, tolerance * 135.4);
+
+    const auto r = PathOf{.gas = nitrogen,
+                          .start = {.pressure = 2e6, .temperature = after->temperature, .amount = 10.0},
+                          .segments = {segment(Polytropic{1.3}, EndKey::pressure, 6e6)}}
+                       .only();
+    EXPECT_NEAR(r.work, 28637.927046864577, tolerance * 28638.0);
+    EXPECT_NEAR(r.heat, -10006.888531475466, tolerance * 28638.0);
+    EXPECT_NEAR(r.to.molar().temperature, 450.606703545619, tolerance * 450.6);
+    EXPECT_NEAR(r.to.volume(), 0.006394096710206649, tolerance * 0.0064);
+}
+
 /// (∂T/∂p)_h by differences of the states that the solver finds [K/bar].
 double jouleThomson(const gas::Gas &gas, double temperature)
 {
