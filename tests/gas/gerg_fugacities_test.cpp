@@ -2,8 +2,8 @@
 
 #include "core/gas/library/gerg_2008.h"
 #include "core/gas/phase/dew_boundary.h"
-#include "core/gas/phase/gerg_fugacities.h"
-#include "core/gas/phase/gerg_reducing.h"
+#include "core/gas/library/gerg_fugacities.h"
+#include "core/gas/library/gerg_reducing.h"
 
 #include <gtest/gtest.h>
 

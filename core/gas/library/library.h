@@ -56,7 +56,8 @@ public:
     [[nodiscard]] Outcome<GasPtr> reference(std::string_view fluid) const;
 
     /// The gas last made from this description (the text of a document's "gas"), if it is still known: what a gas finds
-    /// out about itself at first use, such as its phase boundary, is then not found out again at every change of a path.
+    /// out about itself at first use, such as its phase boundary, is then not found out again at every change of a
+    /// path.
     [[nodiscard]] std::optional<RecentGas> recalled(const std::string &description) const;
     void remember(const std::string &description, RecentGas gas) const;
 

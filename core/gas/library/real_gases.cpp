@@ -4,9 +4,9 @@
 #include "core/gas/equation/plan.h"
 #include "core/gas/ideal/helmholtz_ideal.h"
 #include "core/gas/ideal/ideal_mixture.h"
+#include "core/gas/library/gerg_fugacities.h"
 #include "core/gas/library/library.h"
 #include "core/gas/phase/dew_boundary.h"
-#include "core/gas/phase/gerg_fugacities.h"
 #include "core/gas/phase/pure_saturation.h"
 #include "core/gas/solve/density.h"
 

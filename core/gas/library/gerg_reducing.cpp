@@ -1,4 +1,4 @@
-#include "core/gas/phase/gerg_reducing.h"
+#include "core/gas/library/gerg_reducing.h"
 
 #include <cassert>
 #include <cmath>

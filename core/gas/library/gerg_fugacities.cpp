@@ -1,6 +1,6 @@
-#include "core/gas/phase/gerg_fugacities.h"
+#include "core/gas/library/gerg_fugacities.h"
 
-#include "core/gas/phase/gerg_reducing.h"
+#include "core/gas/library/gerg_reducing.h"
 
 #include <algorithm>
 #include <array>
