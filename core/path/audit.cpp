@@ -21,11 +21,9 @@ struct Changes {
 /// ∫ of what T and v change along one stretch, each integral split where the integrand bends or jumps.
 Outcome<Changes> changesAlong(const QuasiStaticCurve &curve)
 {
-    auto breaks = seamCrossings(curve, {});
-    if (!breaks) return breaks.failure();
     const double end = curve.endCoordinate();
-    for (const CrossingPoint &point : phaseCrossings(curve, 0.0, end)) breaks->push_back(point.coordinate);
-    std::ranges::sort(*breaks, [&](double a, double b) { return end > 0.0 ? a < b : a > b; });
+    const auto breaks = unevenPoints(curve, {}, phaseCrossings(curve, 0.0, end));
+    if (!breaks) return breaks.failure();
     const auto energy = integral(curve, 0.0, end, *breaks, [](const CurveState &c) {
         return c.state.isochoricHeatCapacity * c.dTdx +
                (c.state.temperature * c.state.dpdT - c.state.pressure) * c.dvdx;

@@ -1,10 +1,12 @@
 #include "core/path/phase_crossings.h"
 
 #include "core/gas/equation/equation.h"
+#include "core/path/along_curve.h"
 
 #include <boost/math/tools/minima.hpp>
 #include <boost/math/tools/toms748_solve.hpp>
 
+#include <algorithm>
 #include <cmath>
 #include <optional>
 
@@ -138,6 +140,16 @@ std::optional<CrossingPoint> firstCondensation(const gas::State &from, const Law
             break;
         }
     return nearest;
+}
+
+Outcome<std::vector<double>> unevenPoints(const QuasiStaticCurve &curve, const std::vector<double> &temperatureTurns,
+                                          const std::vector<CrossingPoint> &crossings)
+{
+    auto points = seamCrossings(curve, temperatureTurns);
+    if (!points) return points;
+    for (const CrossingPoint &crossing : crossings) points->push_back(crossing.coordinate);
+    std::ranges::sort(*points, [&](double a, double b) { return curve.endCoordinate() > 0.0 ? a < b : a > b; });
+    return points;
 }
 
 bool computesTwoPhaseStates(const gas::Gas &gas)

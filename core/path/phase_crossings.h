@@ -20,6 +20,12 @@ struct CrossingPoint {
 /// the state is that on its homogeneous side.
 [[nodiscard]] std::vector<CrossingPoint> phaseCrossings(const QuasiStaticCurve &curve, double from, double to);
 
+/// Coordinates in path order where integrands along the curve are not smooth: seams of the gas, and `crossings` of the
+/// phase boundary. `temperatureTurns` as in seamCrossings.
+[[nodiscard]] Outcome<std::vector<double>> unevenPoints(const QuasiStaticCurve &curve,
+                                                        const std::vector<double> &temperatureTurns,
+                                                        const std::vector<CrossingPoint> &crossings);
+
 /// Whether the states under the boundary are computed; if not, a path ends where it would enter.
 [[nodiscard]] bool computesTwoPhaseStates(const gas::Gas &gas);
 

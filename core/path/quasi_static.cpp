@@ -84,11 +84,9 @@ public:
             if (!turns) return at("/end", turns.failure());
             m_temperatureTurns = *turns;
         }
-        const auto seams = seamCrossings(*m_curve, m_temperatureTurns);
-        if (!seams) return at("/end", seams.failure());
-        m_breaks = *seams;
-        for (const CrossingPoint &point : crossings) m_breaks.push_back(point.coordinate);
-        std::ranges::sort(m_breaks, [&](double a, double b) { return end() > 0.0 ? a < b : a > b; });
+        auto breaks = unevenPoints(*m_curve, m_temperatureTurns, crossings);
+        if (!breaks) return at("/end", breaks.failure());
+        m_breaks = std::move(*breaks);
 
         const auto work = workAlongCurve();
         if (!work) return at("/end", work.failure());
@@ -204,10 +202,8 @@ Outcome<SegmentResult> quasiStatic(const gas::State &from, const ResolvedSegment
 Outcome<double> workAlong(const gas::State &from, const Law &law, double endCoordinate)
 {
     const QuasiStaticCurve curve(from.sharedGas(), from.amount(), from.molar(), law, endCoordinate);
-    auto breaks = seamCrossings(curve, {});
+    const auto breaks = unevenPoints(curve, {}, phaseCrossings(curve, 0.0, endCoordinate));
     if (!breaks) return breaks.failure();
-    for (const CrossingPoint &point : phaseCrossings(curve, 0.0, endCoordinate)) breaks->push_back(point.coordinate);
-    std::ranges::sort(*breaks, [&](double a, double b) { return endCoordinate > 0.0 ? a < b : a > b; });
     const auto work = integral(curve, 0.0, endCoordinate, *breaks, workPerCoordinate);
     if (!work) return work;
     return from.amount() * *work;
