@@ -83,17 +83,7 @@ bool isStable(const Equation &equation, double temperature, double density)
     return !equation.boundary || !isTwoPhase(*equation.boundary, temperature, 1.0 / density);
 }
 
-std::optional<double> saturatedSide(const Equation &equation, double temperature, double pressure)
-{
-    const auto pair = equation.saturation->atTemperature(temperature);
-    if (!pair) return std::nullopt;
-    if (pressure > pair->vapour.pressure)
-        return liquidDensityAbove(equation, temperature, pressure, 1.0 / pair->liquid.molarVolume);
-    return vapourDensityBelow(equation, temperature, pressure, 1.0 / pair->vapour.molarVolume);
-}
-
-} // namespace
-
+/// The root of a vapour below `bound`, a density inside which ∂p/∂ρ > 0.
 std::optional<double> vapourDensityBelow(const Equation &equation, double temperature, double pressure, double bound)
 {
     const PressureIsotherm isotherm(equation, temperature, pressure);
@@ -101,6 +91,7 @@ std::optional<double> vapourDensityBelow(const Equation &equation, double temper
     return risingRoot(isotherm, 0.0, bound, std::min(isotherm.target(), 0.9 * bound));
 }
 
+/// The root of a liquid above `bound`, from which on ∂p/∂ρ > 0.
 std::optional<double> liquidDensityAbove(const Equation &equation, double temperature, double pressure, double bound)
 {
     const PressureIsotherm isotherm(equation, temperature, pressure);
@@ -113,6 +104,17 @@ std::optional<double> liquidDensityAbove(const Equation &equation, double temper
     }
     return std::nullopt;
 }
+
+std::optional<double> saturatedSide(const Equation &equation, double temperature, double pressure)
+{
+    const auto pair = equation.saturation->atTemperature(temperature);
+    if (!pair) return std::nullopt;
+    if (pressure > pair->vapour.pressure)
+        return liquidDensityAbove(equation, temperature, pressure, 1.0 / pair->liquid.molarVolume);
+    return vapourDensityBelow(equation, temperature, pressure, 1.0 / pair->vapour.molarVolume);
+}
+
+} // namespace
 
 std::optional<double> molarVolumeAt(const Equation &equation, double temperature, double pressure, double guess)
 {

@@ -12,10 +12,4 @@ namespace quasistat::gas
 [[nodiscard]] std::optional<double> molarVolumeAt(const Equation &equation, double temperature, double pressure,
                                                   double guess = 0.0);
 
-/// The root on one side: of a vapour below `bound` (a density [mol/m³] inside which ∂p/∂ρ > 0), or of a liquid above.
-[[nodiscard]] std::optional<double> vapourDensityBelow(const Equation &equation, double temperature, double pressure,
-                                                       double bound);
-[[nodiscard]] std::optional<double> liquidDensityAbove(const Equation &equation, double temperature, double pressure,
-                                                       double bound);
-
 } // namespace quasistat::gas
